@@ -1,0 +1,32 @@
+using System.Threading;
+using GaussGen.Mathematics.Formats;
+using GaussGen.Mathematics.Moments;
+using GaussGen.Mathematics.Rules;
+
+namespace GaussGen.Mathematics.Requests;
+
+/// <summary>
+/// What is wanted, in the mathematics' own words. Two equal requests have the same table, so a request is the key under
+/// which results are remembered; nothing of the source text that asked for it is in it.
+/// </summary>
+/// <param name="Format">The number format of every entry.</param>
+public abstract record TableRequest(BinaryFormat Format);
+
+/// <summary>A request for nodes and weights on the real line.</summary>
+/// <param name="Format">The number format of every entry.</param>
+/// <param name="DropZeroWeights">Whether nodes whose weight rounds to zero are left out.</param>
+public abstract record RuleRequest(BinaryFormat Format, bool DropZeroWeights) : TableRequest(Format)
+{
+    /// <summary>Constructs the rule, before rounding.</summary>
+    /// <exception cref="System.OperationCanceledException">The token was cancelled.</exception>
+    public abstract RuleTable Construct(CancellationToken cancellation);
+}
+
+/// <summary>A request for the moments of a distribution.</summary>
+/// <param name="Format">The number format of every entry.</param>
+public abstract record MomentRequest(BinaryFormat Format) : TableRequest(Format)
+{
+    /// <summary>Constructs the moments, before rounding.</summary>
+    /// <exception cref="System.OperationCanceledException">The token was cancelled.</exception>
+    public abstract MomentTable Construct(CancellationToken cancellation);
+}
