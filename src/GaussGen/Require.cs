@@ -1,5 +1,6 @@
 using System;
 using System.ComponentModel;
+using System.Runtime.CompilerServices;
 
 namespace GaussGen;
 
@@ -8,11 +9,13 @@ namespace GaussGen;
 public static class Require
 {
     private const string StandardDeviationMessage =
-        "A standard deviation must be finite and not negative. Pass 0 for a value that is known exactly, and the square root of a variance.";
+        "A standard deviation must be finite and not negative. Pass 0 for a value that is known exactly, "
+        + "and the square root of a variance.";
 
     /// <summary>Lets a standard deviation pass that is zero or positive, and finite.</summary>
     /// <param name="standardDeviation">The standard deviation.</param>
     /// <exception cref="ArgumentOutOfRangeException">It is negative, NaN or infinite.</exception>
+    [MethodImpl(MethodImplOptions.AggressiveInlining)]
     public static void StandardDeviation(double standardDeviation)
     {
         // Written so that NaN, which no comparison accepts, is refused too.
@@ -25,6 +28,7 @@ public static class Require
     /// <summary>Lets a standard deviation pass that is zero or positive, and finite.</summary>
     /// <param name="standardDeviation">The standard deviation.</param>
     /// <exception cref="ArgumentOutOfRangeException">It is negative, NaN or infinite.</exception>
+    [MethodImpl(MethodImplOptions.AggressiveInlining)]
     public static void StandardDeviation(float standardDeviation)
     {
         if (!(standardDeviation >= 0.0f && standardDeviation <= float.MaxValue))
@@ -33,7 +37,11 @@ public static class Require
         }
     }
 
-    // The throw sits in a method of its own, so that the check itself is small enough to be inlined.
-    private static void RefuseStandardDeviation(object standardDeviation) =>
+    // The throw sits in methods of their own that never return: the check is then small enough to be inlined, and the JIT keeps
+    // nothing alive across the call.
+    private static void RefuseStandardDeviation(double standardDeviation) =>
+        throw new ArgumentOutOfRangeException(nameof(standardDeviation), standardDeviation, StandardDeviationMessage);
+
+    private static void RefuseStandardDeviation(float standardDeviation) =>
         throw new ArgumentOutOfRangeException(nameof(standardDeviation), standardDeviation, StandardDeviationMessage);
 }

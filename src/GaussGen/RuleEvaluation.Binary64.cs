@@ -1,4 +1,5 @@
 using System;
+using System.Runtime.CompilerServices;
 
 namespace GaussGen;
 
@@ -9,7 +10,9 @@ public static partial class RuleEvaluation
     /// <param name="nodes">The nodes, ascending; node n − 1 − i is the opposite of node i.</param>
     /// <param name="weights">Their weights, as many; weight n − 1 − i equals weight i.</param>
     /// <param name="mean">Where a node of zero is carried to.</param>
-    /// <param name="scale">What a node is multiplied by: the standard deviation, times √2 for a rule of the weight exp(−x²).</param>
+    /// <param name="scale">
+    /// What a node is multiplied by: the standard deviation, times √2 for a rule of the weight exp(−x²).
+    /// </param>
     /// <param name="integrand">The function.</param>
     /// <returns>The sum; f(mean) itself where the scale is 0.</returns>
     /// <exception cref="ArgumentException">There are not as many weights as nodes.</exception>
@@ -23,11 +26,14 @@ public static partial class RuleEvaluation
     /// <param name="nodes">The nodes, ascending; node n − 1 − i is the opposite of node i.</param>
     /// <param name="weights">Their weights, as many; weight n − 1 − i equals weight i.</param>
     /// <param name="mean">Where a node of zero is carried to.</param>
-    /// <param name="scale">What a node is multiplied by: the standard deviation, times √2 for a rule of the weight exp(−x²).</param>
+    /// <param name="scale">
+    /// What a node is multiplied by: the standard deviation, times √2 for a rule of the weight exp(−x²).
+    /// </param>
     /// <param name="factor">One over the sum of the weights, for an expectation; it is applied to the finished sum.</param>
     /// <param name="integrand">The function.</param>
     /// <returns>The sum times the factor; f(mean) itself, without the factor, where the scale is 0.</returns>
     /// <exception cref="ArgumentException">There are not as many weights as nodes.</exception>
+    [MethodImpl(MethodImplOptions.AggressiveInlining)]
     public static double Symmetric<TIntegrand>(
         ReadOnlySpan<double> nodes, ReadOnlySpan<double> weights, double mean, double scale, double factor, TIntegrand integrand)
         where TIntegrand : struct, IIntegrand<double>
@@ -61,7 +67,9 @@ public static partial class RuleEvaluation
     /// <param name="nodes">The nodes, ascending; node n − 1 − i is the opposite of node i.</param>
     /// <param name="weights">Their weights, as many; weight n − 1 − i equals weight i.</param>
     /// <param name="mean">Where a node of zero is carried to.</param>
-    /// <param name="scale">What a node is multiplied by: the standard deviation, times √2 for a rule of the weight exp(−x²).</param>
+    /// <param name="scale">
+    /// What a node is multiplied by: the standard deviation, times √2 for a rule of the weight exp(−x²).
+    /// </param>
     /// <param name="integrand">The function.</param>
     /// <returns>The sum; f(mean) itself where the scale is 0.</returns>
     /// <exception cref="ArgumentNullException">The integrand is <c>null</c>.</exception>
@@ -74,14 +82,21 @@ public static partial class RuleEvaluation
     /// <param name="nodes">The nodes, ascending; node n − 1 − i is the opposite of node i.</param>
     /// <param name="weights">Their weights, as many; weight n − 1 − i equals weight i.</param>
     /// <param name="mean">Where a node of zero is carried to.</param>
-    /// <param name="scale">What a node is multiplied by: the standard deviation, times √2 for a rule of the weight exp(−x²).</param>
+    /// <param name="scale">
+    /// What a node is multiplied by: the standard deviation, times √2 for a rule of the weight exp(−x²).
+    /// </param>
     /// <param name="factor">One over the sum of the weights, for an expectation; it is applied to the finished sum.</param>
     /// <param name="integrand">The function.</param>
     /// <returns>The sum times the factor; f(mean) itself, without the factor, where the scale is 0.</returns>
     /// <exception cref="ArgumentNullException">The integrand is <c>null</c>.</exception>
     /// <exception cref="ArgumentException">There are not as many weights as nodes.</exception>
     public static double Symmetric(
-        ReadOnlySpan<double> nodes, ReadOnlySpan<double> weights, double mean, double scale, double factor, Func<double, double> integrand)
+        ReadOnlySpan<double> nodes,
+        ReadOnlySpan<double> weights,
+        double mean,
+        double scale,
+        double factor,
+        Func<double, double> integrand)
     {
         RequireIntegrand(integrand);
         return Symmetric(nodes, weights, mean, scale, factor, new DelegateIntegrand<double>(integrand));
@@ -111,6 +126,7 @@ public static partial class RuleEvaluation
     /// <param name="integrand">The function.</param>
     /// <returns>The sum times the factor; f(mean) itself, without the factor, where the scale is 0.</returns>
     /// <exception cref="ArgumentException">There are not as many weights as nodes.</exception>
+    [MethodImpl(MethodImplOptions.AggressiveInlining)]
     public static double General<TIntegrand>(
         ReadOnlySpan<double> nodes, ReadOnlySpan<double> weights, double mean, double scale, double factor, TIntegrand integrand)
         where TIntegrand : struct, IIntegrand<double>
@@ -169,7 +185,12 @@ public static partial class RuleEvaluation
     /// <exception cref="ArgumentNullException">The integrand is <c>null</c>.</exception>
     /// <exception cref="ArgumentException">There are not as many weights as nodes.</exception>
     public static double General(
-        ReadOnlySpan<double> nodes, ReadOnlySpan<double> weights, double mean, double scale, double factor, Func<double, double> integrand)
+        ReadOnlySpan<double> nodes,
+        ReadOnlySpan<double> weights,
+        double mean,
+        double scale,
+        double factor,
+        Func<double, double> integrand)
     {
         RequireIntegrand(integrand);
         return General(nodes, weights, mean, scale, factor, new DelegateIntegrand<double>(integrand));
