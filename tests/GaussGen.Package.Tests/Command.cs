@@ -17,13 +17,13 @@ internal sealed record CommandResult(string CommandLine, int ExitCode, string Ou
 /// <summary>Runs a command to its end, with a time limit, as a person's shell would: not as a child of a test host.</summary>
 internal static class Command
 {
-    private static readonly TimeSpan _limit = TimeSpan.FromMinutes(5);
+    private static readonly TimeSpan Limit = TimeSpan.FromMinutes(5);
 
     // What the test host's own dotnet process has set for itself; a second SDK process would take it for its own settings.
-    private static readonly string[] _hostVariables = ["MSBUILD", "VSTEST", "COREHOST"];
+    private static readonly string[] HostVariables = ["MSBUILD", "VSTEST", "COREHOST"];
 
     // No process may outlive the test: neither a build node nor a compiler server, which would keep our pipes open.
-    private static readonly Dictionary<string, string> _ownVariables = new()
+    private static readonly Dictionary<string, string> OwnVariables = new()
     {
         ["MSBUILDDISABLENODEREUSE"] = "1",
         ["UseSharedCompilation"] = "false",
@@ -65,12 +65,12 @@ internal static class Command
         process.StandardInput.Close();
         process.BeginOutputReadLine();
         process.BeginErrorReadLine();
-        if (!process.WaitForExit(_limit))
+        if (!process.WaitForExit(Limit))
         {
             process.Kill(entireProcessTree: true);
             lock (output)
             {
-                throw new TimeoutException($"{commandLine}\nwas not done after {_limit}:\n{output}");
+                throw new TimeoutException($"{commandLine}\nwas not done after {Limit}:\n{output}");
             }
         }
 
@@ -81,13 +81,13 @@ internal static class Command
     private static void SetEnvironment(IDictionary<string, string?> variables, IReadOnlyDictionary<string, string> wanted)
     {
         List<string> inherited = [.. variables.Keys.Where(name =>
-            _hostVariables.Any(prefix => name.StartsWith(prefix, StringComparison.OrdinalIgnoreCase)))];
+            HostVariables.Any(prefix => name.StartsWith(prefix, StringComparison.OrdinalIgnoreCase)))];
         foreach (string name in inherited)
         {
             variables.Remove(name);
         }
 
-        foreach ((string name, string value) in _ownVariables.Concat(wanted))
+        foreach ((string name, string value) in OwnVariables.Concat(wanted))
         {
             variables[name] = value;
         }

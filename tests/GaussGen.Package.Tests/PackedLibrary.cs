@@ -14,7 +14,7 @@ namespace GaussGen.Package.Tests;
 /// </summary>
 public sealed class PackedLibrary : IDisposable
 {
-    private static readonly Dictionary<string, string> _noVariables = [];
+    private static readonly Dictionary<string, string> NoVariables = [];
     private readonly DirectoryInfo _root = Directory.CreateTempSubdirectory("gaussgen-package-");
 
     public PackedLibrary()
@@ -45,7 +45,7 @@ public sealed class PackedLibrary : IDisposable
         string sources = Path.Combine(_root.FullName, name, "sources");
         string output = Path.Combine(_root.FullName, name, "feed");
         Sources.CopyTo(sources);
-        Command.Dotnet(sources, _noVariables, "pack", "src/GaussGen", "--output", output, $"-p:Version={Version}").RequireSuccess();
+        Command.Dotnet(sources, NoVariables, "pack", "src/GaussGen", "--output", output, $"-p:Version={Version}").RequireSuccess();
         return output;
     }
 
@@ -76,7 +76,7 @@ public sealed class PackedLibrary : IDisposable
     private string FindMachinePackages()
     {
         const string prefix = "global-packages:";
-        string[] lines = Command.Dotnet(_root.FullName, _noVariables, "nuget", "locals", "global-packages", "--list")
+        string[] lines = Command.Dotnet(_root.FullName, NoVariables, "nuget", "locals", "global-packages", "--list")
             .RequireSuccess().Output.Split(Environment.NewLine);
         return lines.Single(line => line.StartsWith(prefix, StringComparison.Ordinal))[prefix.Length..].Trim();
     }

@@ -7,7 +7,7 @@ namespace GaussGen.Package.Tests;
 /// <summary>The project's own sources, as a clean checkout has them.</summary>
 internal static class Sources
 {
-    private static readonly string[] _builtFolders = ["bin", "obj", "TestResults"];
+    private static readonly string[] BuiltFolders = ["bin", "obj", "TestResults"];
 
     /// <summary>The repository's root, found from the folder that this test runs in.</summary>
     public static string Root { get; } = FindRoot();
@@ -32,7 +32,7 @@ internal static class Sources
             file.CopyTo(Path.Combine(to, file.Name));
         }
 
-        foreach (DirectoryInfo inner in from.EnumerateDirectories().Where(inner => !_builtFolders.Contains(inner.Name)))
+        foreach (DirectoryInfo inner in from.EnumerateDirectories().Where(inner => !BuiltFolders.Contains(inner.Name)))
         {
             CopyFolder(inner, Path.Combine(to, inner.Name));
         }
