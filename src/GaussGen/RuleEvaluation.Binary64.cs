@@ -44,7 +44,7 @@ public static partial class RuleEvaluation
             return integrand.Evaluate(mean);
         }
 
-        // Both halves are cut to one length, which is also the loop's limit: that is what lets the JIT drop the bounds checks.
+        // Both pieces have the length that limits the loop: that is what lets the JIT drop the bounds checks.
         int half = nodes.Length / 2;
         ReadOnlySpan<double> halfNodes = nodes.Slice(0, half);
         ReadOnlySpan<double> halfWeights = weights.Slice(0, half);
@@ -137,19 +137,23 @@ public static partial class RuleEvaluation
             return integrand.Evaluate(mean);
         }
 
-        // Each half runs towards the middle with a sum of its own, and all four pieces have the length that limits the loop.
+        // Each half runs towards the middle with a sum of its own. Every loop is limited by the common length of the pieces it
+        // reads: that is what lets the JIT drop the bounds checks.
         int half = nodes.Length / 2;
         ReadOnlySpan<double> lowNodes = nodes.Slice(0, half);
         ReadOnlySpan<double> lowWeights = weights.Slice(0, half);
-        ReadOnlySpan<double> highNodes = nodes.Slice(nodes.Length - half, half);
-        ReadOnlySpan<double> highWeights = weights.Slice(nodes.Length - half, half);
         double low = 0.0;
-        double high = 0.0;
         for (int i = 0; i < lowNodes.Length; i++)
         {
-            int j = highNodes.Length - 1 - i;
             low += lowWeights[i] * integrand.Evaluate(mean + (scale * lowNodes[i]));
-            high += highWeights[j] * integrand.Evaluate(mean + (scale * highNodes[j]));
+        }
+
+        ReadOnlySpan<double> highNodes = nodes.Slice(nodes.Length - half, half);
+        ReadOnlySpan<double> highWeights = weights.Slice(nodes.Length - half, half);
+        double high = 0.0;
+        for (int i = highNodes.Length - 1; i >= 0; i--)
+        {
+            high += highWeights[i] * integrand.Evaluate(mean + (scale * highNodes[i]));
         }
 
         double sum = low + high;

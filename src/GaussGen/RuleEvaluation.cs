@@ -15,8 +15,8 @@ namespace GaussGen;
 /// <para>Nothing is checked but the lengths of the spans: generated code checks its arguments with <see cref="Require"/>. A mean
 /// that is NaN or infinite reaches the integrand. A node whose weight is zero is evaluated like any other, so that an
 /// infinite value there makes the result NaN.</para>
-/// <para>Nothing is allocated. The loops are inlined into the generated member: there the length of the table is a constant of the
-/// program, and no bounds check is left in them.</para>
+/// <para>Nothing is allocated. The loops are inlined into the generated member: there the length of the table is a constant of
+/// the program, and no bounds check is left in them.</para>
 /// </remarks>
 [EditorBrowsable(EditorBrowsableState.Never)]
 public static partial class RuleEvaluation
