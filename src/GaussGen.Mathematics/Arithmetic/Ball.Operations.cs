@@ -66,7 +66,8 @@ public readonly partial struct Ball
             radius += (Bound.FromMagnitude(right.Midpoint, right.Exponent) + right.Radius) * left.Radius;
         }
 
-        return Rounded(left.Midpoint * right.Midpoint, checked(left.Exponent + right.Exponent), radius, precision);
+        int length = Magnitude.BitLength(left.Midpoint) + Magnitude.BitLength(right.Midpoint) - 1;
+        return Rounded(left.Midpoint * right.Midpoint, checked(left.Exponent + right.Exponent), radius, precision, length);
     }
 
     /// <summary>The square; tighter and cheaper than the product of a ball with itself.</summary>
@@ -81,7 +82,8 @@ public readonly partial struct Ball
         Bound radius = value.Radius.IsZero
             ? default
             : (Bound.FromMagnitude(value.Midpoint, checked(value.Exponent + 1)) + value.Radius) * value.Radius;
-        return Rounded(value.Midpoint * value.Midpoint, checked(2 * value.Exponent), radius, precision);
+        int length = (2 * Magnitude.BitLength(value.Midpoint)) - 1;
+        return Rounded(value.Midpoint * value.Midpoint, checked(2 * value.Exponent), radius, precision, length);
     }
 
     /// <summary>The quotient; the whole line where the divisor's ball contains zero.</summary>

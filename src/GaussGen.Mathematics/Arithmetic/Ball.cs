@@ -148,14 +148,17 @@ public readonly partial struct Ball
     public override string ToString() => "[" + Center + " +/- " + Radius + "]";
 
     /// <summary>Drops what is beyond the precision, or far below the radius, and accounts for it.</summary>
-    private static Ball Rounded(BigInteger midpoint, int exponent, Bound radius, int precision)
+    private static Ball Rounded(BigInteger midpoint, int exponent, Bound radius, int precision) =>
+        Rounded(midpoint, exponent, radius, precision, Magnitude.BitLength(midpoint));
+
+    /// <summary>The same for a midpoint whose bit length, or one less, is known.</summary>
+    private static Ball Rounded(BigInteger midpoint, int exponent, Bound radius, int precision, int length)
     {
         if (!radius.IsFinite)
         {
             return WholeLine;
         }
 
-        int length = Magnitude.BitLength(midpoint);
         long shift = (long)length - Math.Max(precision, 1);
         if (!radius.IsZero)
         {

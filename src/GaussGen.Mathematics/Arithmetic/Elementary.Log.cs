@@ -1,4 +1,5 @@
 using System;
+using System.Numerics;
 using System.Threading;
 
 namespace GaussGen.Mathematics.Arithmetic;
@@ -65,8 +66,8 @@ public static partial class Elementary
             return LogOnePlus(distance, precision, cancellation);
         }
 
-        // log m = y + log(m·exp(−y)) for any y; here y is log m to some 28 bits, so that the second logarithm is of a number
-        // next to 1. Nothing depends on how good y is but the length of the series. As |log m| > 2^−22, 24 more bits suffice.
+        // log m = y + log(m·exp(−y)) for any y; here y is log m within 2⁻²⁶, so that the second logarithm is of a number next
+        // to 1 and its series is short. As |log m| > 2⁻²², 24 more bits suffice.
         int working = precision + 24;
         Dyadic guess = LogGuess(m.Center);
         Ball scaled = Ball.Multiply(m, Exp(Ball.FromDyadic(-guess), working, cancellation), working);
@@ -74,32 +75,55 @@ public static partial class Elementary
         return Ball.Add(Ball.FromDyadic(guess), rest, precision);
     }
 
-    /// <summary>log(1 + d) for a ball d below 1/2 in magnitude.</summary>
-    /// <remarks>
-    /// 2 artanh(s), s = d/(2 + d), by its series Σ s^(2i+1)/(2i+1) (NIST DLMF 4.6.4). With |s| ≤ 2^−p the terms from the
-    /// n-th on sum to at most 2^−p(2n+1) · 4/3.
-    /// </remarks>
+    /// <summary>log(1 + d) for a ball d within 2⁻¹⁸ of zero, with about so many bits relative to d.</summary>
     private static Ball LogOnePlus(Ball d, int precision, CancellationToken cancellation)
     {
-        Ball s = Ball.Divide(d, Ball.Add(d, Ball.FromInteger(2), precision), precision);
-        Ball square = Ball.Square(s, precision);
-        int sizeLog2 = (Bound.FromMagnitude(s.Midpoint, s.Exponent) + s.Radius).CeilingLog2;
-        int p = sizeLog2 == int.MinValue ? precision : -sizeLog2;
-        Ball power = s;
-        Ball sum = s;
-        int index = 1;
-        for (; (long)p * 2 * index < precision; index++)
+        // |log(1 + x) − log(1 + d)| ≤ r/(1 − 2⁻¹⁸) < r (1 + 2⁻¹⁶) for |x − d| ≤ r.
+        Bound radius = d.Radius + d.Radius.ScaleByPowerOfTwo(-16);
+        if (d.Midpoint.IsZero)
         {
-            cancellation.ThrowIfCancellationRequested();
-            power = Ball.Multiply(power, square, precision);
-            sum = Ball.Add(sum, Ball.Divide(power, Ball.FromInteger((2 * index) + 1), precision), precision);
+            return new Ball(BigInteger.Zero, 0, radius);
         }
 
-        Bound truncation = Bound.PowerOfTwo(checked(-p * ((2 * index) + 1) + 1));
-        return sum.Enlarge(truncation).ScaleByPowerOfTwo(1);
+        int size = checked(-(Magnitude.BitLength(d.Midpoint) + d.Exponent));
+        int bits = checked(Math.Max(precision, 1) + size + 16);
+        BigInteger series = Artanh(d.Center, bits, cancellation, out ulong units);
+        return new Ball(series, 1 - bits, radius + Bound.FromParts(units, 1 - bits));
     }
 
-    /// <summary>log m to some 28 bits for m in [3/4, 3/2), in integers, so that it is the same number on every host.</summary>
+    /// <summary>
+    /// artanh(d/(2 + d)), half of log(1 + d), in units of 2^−bits for 0 &lt; |d| &lt; 2⁻¹⁸, off by less than
+    /// <paramref name="error"/> units.
+    /// </summary>
+    /// <remarks>
+    /// Σ s^(2i+1)/(2i+1), s = d/(2 + d) (NIST DLMF 4.6.4), of the magnitude of s. The quotient s is too small by less than one
+    /// unit, its square by less than 2 and each power by less than 2, so each term by less than 3. With the series' argument
+    /// below 2^−17 what follows the first power below one unit sums to less than 3.
+    /// </remarks>
+    private static BigInteger Artanh(Dyadic d, int bits, CancellationToken cancellation, out ulong error)
+    {
+        Dyadic divisor = d + new Dyadic(2, 0);
+        int shift = checked(d.Exponent - divisor.Exponent + bits);
+        BigInteger s = shift >= 0
+            ? (BigInteger.Abs(d.Mantissa) << shift) / divisor.Mantissa
+            : BigInteger.Abs(d.Mantissa) / (divisor.Mantissa << -shift);
+        BigInteger square = (s * s) >> bits;
+        BigInteger power = s;
+        BigInteger sum = s;
+        int index = 1;
+        while (!power.IsZero)
+        {
+            cancellation.ThrowIfCancellationRequested();
+            power = (power * square) >> bits;
+            sum += power / ((2 * index) + 1);
+            index++;
+        }
+
+        error = (3UL * (ulong)index) + 3;
+        return d.Sign < 0 ? -sum : sum;
+    }
+
+    /// <summary>log m within 2⁻²⁶ for m in [3/4, 3/2), in integers, so that it is the same number on every host.</summary>
     private static Dyadic LogGuess(Dyadic m)
     {
         const int Bits = 30;
@@ -108,7 +132,7 @@ public static partial class Elementary
         long s = ((x - one) << Bits) / (x + one);
         long square = (s * s) >> Bits;
         long sum = 0;
-        // |s| ≤ 1/5, so that eight terms leave less than 2^−39.
+        // |s| ≤ 1/5, so that eight terms leave less than 2^−39; the roundings of some units of 2⁻³⁰ shrink with the powers of s.
         for (int i = 15; i >= 1; i -= 2)
         {
             sum = ((sum * square) >> Bits) + (one / i);
