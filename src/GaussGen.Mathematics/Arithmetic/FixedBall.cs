@@ -9,7 +9,7 @@ namespace GaussGen.Mathematics.Arithmetic;
 /// <param name="exponent">The power of two of the mantissa's last place.</param>
 /// <param name="isNegative">Whether the midpoint is negated.</param>
 /// <param name="radiusUnits">The radius in units of the mantissa's last place.</param>
-public readonly struct FixedBall(ulong high, ulong low, int exponent, bool isNegative, ulong radiusUnits)
+public readonly partial struct FixedBall(ulong high, ulong low, int exponent, bool isNegative, ulong radiusUnits)
 {
     /// <summary>The upper half of the mantissa.</summary>
     public ulong High { get; } = high;

@@ -1,0 +1,109 @@
+namespace GaussGen.Mathematics.Arithmetic;
+
+/// <summary>Division of 128-bit integers.</summary>
+internal static class FixedDivision
+{
+    private const double TwoTo64 = 18446744073709551616.0;
+
+    /// <summary>
+    /// The quotient ⌊M · 2^shift / N⌋ of 128-bit numbers M and N with their leading bits set, where it has 128 bits: for
+    /// M &lt; N and shift 128, or M ≥ N and shift 127.
+    /// </summary>
+    internal static void Quotient(
+        ulong high, ulong low, int shift, ulong divisorHigh, ulong divisorLow, out ulong quotientHigh, out ulong quotientLow, out bool isExact)
+    {
+        double reciprocal = 1.0 / divisorHigh;
+        var remainder = new Remainder(high, low);
+        // Signed digits, each the nearest integer to remainder · 2^bits / divisor as far as double tells. The first is taken
+        // without a shift so that the remainder is within about half a divisor before the 128 or 127 bits begin.
+        long digit0 = remainder.TakeDigit(0, reciprocal, divisorHigh, divisorLow);
+        long digit1 = remainder.TakeDigit(43, reciprocal, divisorHigh, divisorLow);
+        long digit2 = remainder.TakeDigit(43, reciprocal, divisorHigh, divisorLow);
+        int last = shift - 86;
+        long digit3 = remainder.TakeDigit(last, reciprocal, divisorHigh, divisorLow);
+
+        // ((digit0·2^43 + digit1)·2^43 + digit2)·2^last + digit3, modulo 2^128; the true value fits.
+        long upper = (digit0 << 43) + digit1;
+        ulong sumHigh = (ulong)(upper >> 21);
+        ulong sumLow = (ulong)upper << 43;
+        Add(ref sumHigh, ref sumLow, digit2);
+        sumHigh = (sumHigh << last) | (sumLow >> (64 - last));
+        sumLow <<= last;
+        Add(ref sumHigh, ref sumLow, digit3);
+
+        while (remainder.IsNegative)
+        {
+            Add(ref sumHigh, ref sumLow, -1);
+            remainder.AddMultiple(1, divisorHigh, divisorLow);
+        }
+
+        while (remainder.IsAtLeast(divisorHigh, divisorLow))
+        {
+            Add(ref sumHigh, ref sumLow, 1);
+            remainder.AddMultiple(-1, divisorHigh, divisorLow);
+        }
+
+        quotientHigh = sumHigh;
+        quotientLow = sumLow;
+        isExact = remainder.IsZero;
+    }
+
+    private static void Add(ref ulong high, ref ulong low, long addend)
+    {
+        low += (ulong)addend;
+        high += (ulong)(addend >> 63) + (low < (ulong)addend ? 1UL : 0UL);
+    }
+
+    /// <summary>A signed integer of 192 bits.</summary>
+    private struct Remainder(ulong middle, ulong low)
+    {
+        private long _high;
+        private ulong _middle = middle;
+        private ulong _low = low;
+
+        internal readonly bool IsNegative => _high < 0;
+
+        internal readonly bool IsZero => (_high | (long)_middle | (long)_low) == 0;
+
+        internal readonly bool IsAtLeast(ulong high, ulong low) =>
+            _high > 0 || (_high == 0 && (_middle > high || (_middle == high && _low >= low)));
+
+        /// <summary>Shifts left by less than 64, and takes off a multiple of the divisor so that about half of it is left.</summary>
+        internal long TakeDigit(int shift, double reciprocal, ulong divisorHigh, ulong divisorLow)
+        {
+            if (shift != 0)
+            {
+                _high = (_high << shift) | (long)(_middle >> (64 - shift));
+                _middle = (_middle << shift) | (_low >> (64 - shift));
+                _low <<= shift;
+            }
+
+            double quotient = ((_high * TwoTo64) + _middle) * reciprocal;
+            var digit = (long)(quotient < 0 ? quotient - 0.5 : quotient + 0.5);
+            AddMultiple(-digit, divisorHigh, divisorLow);
+            return digit;
+        }
+
+        internal void AddMultiple(long factor, ulong high, ulong low)
+        {
+            var magnitude = (ulong)(factor < 0 ? -factor : factor);
+            ulong carry = WideProduct.Multiply(low, magnitude, out ulong word0);
+            ulong word2 = WideProduct.Multiply(high, magnitude, out ulong word1);
+            word2 += WideProduct.Add(ref word1, carry);
+            if (factor < 0)
+            {
+                ulong borrow = _low < word0 ? 1UL : 0UL;
+                _low -= word0;
+                ulong next = _middle < word1 || (_middle == word1 && borrow != 0) ? 1UL : 0UL;
+                _middle -= word1 + borrow;
+                _high -= (long)(word2 + next);
+            }
+            else
+            {
+                carry = WideProduct.Add(ref _low, word0);
+                carry = WideProduct.Add(ref _middle, carry) + WideProduct.Add(ref _middle, word1);
+                _high += (long)(word2 + carry);
+            }
+        }
+    }
+}
