@@ -95,7 +95,20 @@ public readonly struct Dyadic(BigInteger mantissa, int exponent) : IEquatable<Dy
     /// <summary>The number as a quotient of integers, exactly.</summary>
     public Rational ToRational() => Exponent >= 0
         ? Rational.FromInteger(Mantissa << Exponent)
-        : new Rational(Mantissa, BigInteger.One << -Exponent);
+        : Rational.FromReduced(Reduce());
+
+    /// <summary>The same number with an odd mantissa; zero as the default value.</summary>
+    public Dyadic Reduce()
+    {
+        if (!Mantissa.IsEven)
+        {
+            return this;
+        }
+
+        // m & −m is the lowest bit that is set.
+        int zeros = Magnitude.BitLength(Mantissa & -Mantissa) - 1;
+        return IsZero ? default : new Dyadic(Mantissa >> zeros, checked(Exponent + zeros));
+    }
 
     /// <inheritdoc/>
     public int CompareTo(Dyadic other)

@@ -105,6 +105,11 @@ public readonly struct Rational : IEquatable<Rational>, IComparable<Rational>
     /// <summary>The integer itself.</summary>
     public static Rational FromInteger(BigInteger value) => new(value, BigInteger.One, reduced: true);
 
+    /// <summary>A dyadic number with an odd mantissa: no common divisor has to be sought, which is slow for long mantissas.</summary>
+    internal static Rational FromReduced(Dyadic value) => value.Exponent >= 0
+        ? FromInteger(value.Mantissa << value.Exponent)
+        : new Rational(value.Mantissa, BigInteger.One << -value.Exponent, reduced: true);
+
     /// <summary>The exact value of a binary64 number: 0.1 is 3602879701896397/2⁵⁵, not 1/10.</summary>
     /// <exception cref="ArgumentOutOfRangeException">The value is NaN or infinite.</exception>
     public static Rational FromDouble(double value)
