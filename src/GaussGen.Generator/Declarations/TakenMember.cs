@@ -1,0 +1,86 @@
+using System.Collections.Generic;
+using System.Collections.Immutable;
+using System.Linq;
+using System.Text.RegularExpressions;
+using Microsoft.CodeAnalysis;
+
+namespace GaussGen.Generator.Declarations;
+
+/// <summary>A name that a type already uses, and what uses it.</summary>
+/// <param name="Name">The name.</param>
+/// <param name="Holder">A member of the type, a member of a base type, or the type itself.</param>
+internal readonly record struct TakenMember(TakenName Name, ISymbol Holder)
+{
+    private const string Getter = "get_";
+
+    /// <summary>The names that generated members of a shape can have; all that is asked for here is that none is missing.</summary>
+    private static readonly ImmutableDictionary<TableShape, Regex> GeneratedNames = ImmutableDictionary<TableShape, Regex>.Empty
+        .Add(TableShape.Rule, new Regex("^(PointCount|DegreeOfExactness|Expectation|Integral|(GaussGen)?(Nodes|Weights))$", RegexOptions.CultureInvariant))
+        .Add(TableShape.Moments, new Regex("^(GaussGen)?(Raw|Central|Absolute)[0-9]*$", RegexOptions.CultureInvariant));
+
+    /// <summary>A member that every table of a shape has.</summary>
+    private static readonly ImmutableDictionary<TableShape, string> FirstNames = ImmutableDictionary<TableShape, string>.Empty
+        .Add(TableShape.Rule, "Nodes")
+        .Add(TableShape.Moments, "Raw");
+
+    /// <summary>Whether a generated member of a shape might have a name.</summary>
+    public static bool MightBeGenerated(TableShape shape, string name) => GeneratedNames[shape].IsMatch(name);
+
+    /// <summary>
+    /// The names in use that generated members might have: the type's own name, its other members, and members that it
+    /// inherits, which the generated ones would hide.
+    /// </summary>
+    public static IEnumerable<TakenMember> FindIn(
+        INamedTypeSymbol type, TableShape shape, ImmutableArray<Family> families, Compilation compilation)
+    {
+        if (MightBeGenerated(shape, type.Name))
+        {
+            yield return new TakenMember(new TakenName(type.Name, null), type);
+        }
+
+        foreach (TakenMember own in MembersOf(type, shape).Where(own => !IsGenerated(own.Holder)))
+        {
+            yield return own;
+        }
+
+        for (INamedTypeSymbol? ancestor = type.BaseType; ancestor is not null; ancestor = ancestor.BaseType)
+        {
+            foreach (TakenMember inherited in MembersOf(ancestor, shape))
+            {
+                if (compilation.IsSymbolAccessibleWithin(inherited.Holder, type))
+                {
+                    yield return inherited;
+                }
+            }
+
+            // While the generator runs, what it writes for the ancestor is not there yet.
+            if (families.Any(family => family.Shape == shape && family.FindOn(ancestor) is not null))
+            {
+                yield return new TakenMember(new TakenName(FirstNames[shape], null), ancestor);
+            }
+        }
+    }
+
+    private static IEnumerable<TakenMember> MembersOf(INamedTypeSymbol type, TableShape shape)
+    {
+        foreach (ISymbol member in type.GetMembers())
+        {
+            if (MightBeGenerated(shape, member.Name))
+            {
+                string? signature = member is IMethodSymbol method ? MethodSignature.Of(method) : null;
+                yield return new TakenMember(new TakenName(member.Name, signature), member);
+            }
+            else if (member is IMethodSymbol { MethodKind: MethodKind.Ordinary } accessor
+                && accessor.Name.StartsWith(Getter, System.StringComparison.Ordinal)
+                && MightBeGenerated(shape, accessor.Name.Substring(Getter.Length)))
+            {
+                yield return new TakenMember(new TakenName(accessor.Name.Substring(Getter.Length), null), accessor);
+            }
+        }
+    }
+
+    private static bool IsGenerated(ISymbol member) => member.GetAttributes().Any(attribute =>
+        attribute.AttributeClass?.Name == "GeneratedCodeAttribute"
+        && attribute.ConstructorArguments.Length > 0
+        && attribute.ConstructorArguments[0].Value as string == GeneratorIdentity.Name);
+}

@@ -1,0 +1,58 @@
+using System;
+using System.Collections.Immutable;
+using System.Threading;
+using GaussGen.Generator.Declarations;
+using GaussGen.Generator.Emission;
+using Microsoft.CodeAnalysis;
+using Microsoft.CodeAnalysis.Diagnostics;
+
+namespace GaussGen.Generator.Diagnostics;
+
+/// <summary>Tells what is wrong with the declarations of tables: each mistake once, at the place where it is to be mended.</summary>
+[DiagnosticAnalyzer(LanguageNames.CSharp)]
+public sealed class DeclarationAnalyzer : DiagnosticAnalyzer
+{
+    private readonly ImmutableArray<Family> _families;
+
+    /// <summary>An analyzer for every family in the declaration table.</summary>
+    public DeclarationAnalyzer()
+        : this(DeclarationTable.Families)
+    {
+    }
+
+    internal DeclarationAnalyzer(ImmutableArray<Family> families) => _families = families;
+
+    /// <inheritdoc/>
+    public override ImmutableArray<DiagnosticDescriptor> SupportedDiagnostics => DiagnosticDescriptors.All;
+
+    /// <inheritdoc/>
+    public override void Initialize(AnalysisContext context)
+    {
+        context.ConfigureGeneratedCodeAnalysis(GeneratedCodeAnalysisFlags.None);
+        context.EnableConcurrentExecution();
+        context.RegisterCompilationStartAction(Start);
+    }
+
+    private void Start(CompilationStartAnalysisContext context)
+    {
+        TargetCapabilities target = TargetCapabilities.Of(context.Compilation, context.CancellationToken);
+        if (target.HasLanguage)
+        {
+            context.RegisterSymbolAction(symbol => CheckType(symbol, target), SymbolKind.NamedType);
+            return;
+        }
+
+        Lazy<INamedTypeSymbol?> first = new(() => LanguageCheck.FirstDeclared(context.Compilation, _families), LazyThreadSafetyMode.PublicationOnly);
+        context.RegisterSymbolAction(symbol => LanguageCheck.Report(symbol, first, _families), SymbolKind.NamedType);
+    }
+
+    private void CheckType(SymbolAnalysisContext context, TargetCapabilities target)
+    {
+        INamedTypeSymbol type = (INamedTypeSymbol)context.Symbol;
+        HostCheck.Report(context, type, _families);
+        if (type.TypeKind is TypeKind.Class or TypeKind.Struct)
+        {
+            TableCheck.Report(context, type, _families, target);
+        }
+    }
+}

@@ -1,0 +1,108 @@
+using System.Collections.Immutable;
+using Microsoft.CodeAnalysis;
+
+namespace GaussGen.Generator.Diagnostics;
+
+/// <summary>What can be wrong with a declaration. Numbers are never given twice; the readme has a section for each.</summary>
+internal static class DiagnosticDescriptors
+{
+    public static readonly DiagnosticDescriptor NotPartial = Mistake(
+        "GAUSS001",
+        Category.Declaration,
+        "A type with a table must be partial",
+        "Make '{0}' partial: [{1}] on '{2}' generates a part of it");
+
+    public static readonly DiagnosticDescriptor Generic = Mistake(
+        "GAUSS002",
+        Category.Declaration,
+        "A type with a table must not be generic",
+        "Take the type parameters from '{0}', or move [{1}] to a type outside it: a table on a generic type would exist once for each type argument");
+
+    public static readonly DiagnosticDescriptor FileLocal = Mistake(
+        "GAUSS003",
+        Category.Declaration,
+        "A type with a table must not be local to a file",
+        "Take 'file' from '{0}': [{1}] on '{2}' generates a part of it in another file, where it would be a different type");
+
+    public static readonly DiagnosticDescriptor PointsOutOfRange = Mistake(
+        "GAUSS004",
+        Category.Argument,
+        "The number of points is out of range",
+        "Ask for {1} to {2} points instead of {0}");
+
+    public static readonly DiagnosticDescriptor CollidingTables = Mistake(
+        "GAUSS005",
+        Category.Declaration,
+        "Two tables on one type have the same members",
+        "Move [{0}] to a type of its own: [{1}] already gives '{2}' members of the same names");
+
+    public static readonly DiagnosticDescriptor NameTaken = Mistake(
+        "GAUSS006",
+        Category.Declaration,
+        "The name of a generated member is taken",
+        "Rename '{0}', or move [{1}] to another type: the generated part of '{2}' has a member '{3}'");
+
+    public static readonly DiagnosticDescriptor NotFinite = Mistake(
+        "GAUSS007",
+        Category.Argument,
+        "An argument must be finite",
+        "Give '{0}' a finite value instead of {1}");
+
+    public static readonly DiagnosticDescriptor NotPositive = Mistake(
+        "GAUSS008",
+        Category.Argument,
+        "An argument must be positive and finite",
+        "Give '{0}' a positive, finite value instead of {1}");
+
+    public static readonly DiagnosticDescriptor OrderOutOfRange = Mistake(
+        "GAUSS009",
+        Category.Argument,
+        "The order of moments is out of range",
+        "Set MaximumOrder to {1} to {2} instead of {0}");
+
+    public static readonly DiagnosticDescriptor Undefined = Mistake(
+        "GAUSS010",
+        Category.Argument,
+        "The value is not a member of its enumeration",
+        "Use {2}: {1} has no member with the value {0}");
+
+    public static readonly DiagnosticDescriptor MomentOverflow = Mistake(
+        "GAUSS011",
+        Category.Range,
+        "A moment is too large for the number format",
+        "Set MaximumOrder to {0} at most, use a wider format, or measure in a larger unit: the moment of order {1} is too large for {2}");
+
+    public static readonly DiagnosticDescriptor ZeroWeights = new(
+        "GAUSS012",
+        "Weights round to zero",
+        "{0} of the {1} weights round to zero in {2}, from magnitude {3} of the node outwards; set DropZeroWeights = true to leave those nodes out, or ask for fewer points",
+        Category.Range,
+        DiagnosticSeverity.Warning,
+        isEnabledByDefault: true,
+        helpLinkUri: HelpLink.Of("GAUSS012"));
+
+    public static readonly DiagnosticDescriptor LanguageVersion = Mistake(
+        "GAUSS013",
+        Category.Declaration,
+        "Tables need C# 9 or later",
+        "Set LangVersion to 9.0 or later: this project compiles C# {0}, and [{1}] generates code that needs C# 9.0");
+
+    public static ImmutableArray<DiagnosticDescriptor> All { get; } = ImmutableArray.Create(
+        NotPartial, Generic, FileLocal, PointsOutOfRange, CollidingTables, NameTaken, NotFinite, NotPositive, OrderOutOfRange, Undefined,
+        MomentOverflow, ZeroWeights, LanguageVersion);
+
+    private static DiagnosticDescriptor Mistake(string id, string category, string title, string message) =>
+        new(id, title, message, category, DiagnosticSeverity.Error, isEnabledByDefault: true, helpLinkUri: HelpLink.Of(id));
+
+    private static class Category
+    {
+        /// <summary>Where the attribute stands.</summary>
+        public const string Declaration = "GaussGen.Declaration";
+
+        /// <summary>What the attribute says.</summary>
+        public const string Argument = "GaussGen.Argument";
+
+        /// <summary>What becomes of the numbers.</summary>
+        public const string Range = "GaussGen.Range";
+    }
+}

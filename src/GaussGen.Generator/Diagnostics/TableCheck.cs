@@ -1,0 +1,140 @@
+using System.Collections.Generic;
+using System.Collections.Immutable;
+using System.Linq;
+using System.Threading;
+using GaussGen.Generator.Declarations;
+using GaussGen.Generator.Emission;
+using GaussGen.Mathematics.Moments;
+using GaussGen.Mathematics.Requests;
+using GaussGen.Mathematics.Rules;
+using Microsoft.CodeAnalysis;
+using Microsoft.CodeAnalysis.Diagnostics;
+
+namespace GaussGen.Generator.Diagnostics;
+
+/// <summary>Whether the tables that a type asks for can be made, and can stand on it beside each other and its own members.</summary>
+internal static class TableCheck
+{
+    public static void Report(
+        SymbolAnalysisContext context, INamedTypeSymbol type, ImmutableArray<Family> families, TargetCapabilities target)
+    {
+        DeclaredFamily[] declared = families.AllOn(type).OrderBy(each => SourceOrder.Of(each.Attribute)).ToArray();
+        foreach (DeclaredFamily each in declared)
+        {
+            ReportCollision(context, type, each, declared);
+            ArgumentReader arguments = new(each.Attribute);
+            TableRequest request = each.Family.ReadRequest(arguments);
+            if (arguments.IsRefusedByCompiler)
+            {
+                continue;
+            }
+
+            foreach (Mistake mistake in arguments.Mistakes)
+            {
+                Report(context, each, mistake);
+            }
+
+            if (arguments.Mistakes.Count == 0)
+            {
+                ReportRange(context, each, request);
+                ReportTakenNames(context, type, each, request, families, target);
+            }
+        }
+    }
+
+    private static void ReportCollision(
+        SymbolAnalysisContext context, INamedTypeSymbol type, DeclaredFamily declared, IReadOnlyList<DeclaredFamily> all)
+    {
+        DeclaredFamily first = all.First(each => each.Family.Shape == declared.Family.Shape);
+        if (first.Family != declared.Family)
+        {
+            Location place = AttributePlace.Of(declared.Attribute, context.CancellationToken);
+            context.ReportDiagnostic(Diagnostic.Create(
+                DiagnosticDescriptors.CollidingTables, place, declared.Family.Name, first.Family.Name, DisplayName.Of(type)));
+        }
+    }
+
+    private static void ReportRange(SymbolAnalysisContext context, DeclaredFamily declared, TableRequest request)
+    {
+        if (request is RuleRequest { DropZeroWeights: false } ruleRequest)
+        {
+            RoundedRule rule = TableMemo.Get(ruleRequest, context.CancellationToken);
+            if (rule.FirstZeroWeightNode is { } first)
+            {
+                Report(context, declared, new Mistake(
+                    DiagnosticDescriptors.ZeroWeights,
+                    ArgumentReader.PointsArgument,
+                    rule.ZeroWeights,
+                    rule.Table.Nodes.Count,
+                    rule.Format.Name,
+                    NumberType.Of(rule.Format).Literal(first)));
+            }
+        }
+        else if (request is MomentRequest momentRequest)
+        {
+            RoundedMoments moments = TableMemo.Get(momentRequest, context.CancellationToken);
+            if (moments.FirstOverflow is { } order)
+            {
+                Report(context, declared, new Mistake(
+                    DiagnosticDescriptors.MomentOverflow, ArgumentReader.MaximumOrderArgument, order - 1, order, moments.Format.Name));
+            }
+        }
+    }
+
+    private static void ReportTakenNames(
+        SymbolAnalysisContext context,
+        INamedTypeSymbol type,
+        DeclaredFamily declared,
+        TableRequest request,
+        ImmutableArray<Family> families,
+        TargetCapabilities target)
+    {
+        TakenMember[] taken = TakenMember.FindIn(type, declared.Family.Shape, families, context.Compilation).ToArray();
+        if (taken.Length == 0 || FilePrinter.Construct(request, target, context.CancellationToken) is not { } part)
+        {
+            return;
+        }
+
+        bool isInheritanceTold = false;
+        foreach (TakenMember each in taken)
+        {
+            if (part.Members.FirstOrDefault(member => each.Name.Excludes(member.Name, member.Signature)) is not { } excluded)
+            {
+                continue;
+            }
+
+            // What is inherited may be out of reach: there the attribute is what can be moved, and one report is enough.
+            bool isOwn = SymbolEqualityComparer.Default.Equals(each.Holder, type)
+                || SymbolEqualityComparer.Default.Equals(each.Holder.ContainingType, type);
+            if (isOwn || !isInheritanceTold)
+            {
+                isInheritanceTold |= !isOwn;
+                context.ReportDiagnostic(Diagnostic.Create(
+                    DiagnosticDescriptors.NameTaken,
+                    PlaceOf(each.Holder, type, declared.Attribute, context.CancellationToken),
+                    DisplayName.Of(each.Holder),
+                    declared.Family.Name,
+                    DisplayName.Of(type),
+                    excluded.Name));
+            }
+        }
+    }
+
+    private static Location PlaceOf(ISymbol holder, INamedTypeSymbol type, AttributeData attribute, CancellationToken cancellation)
+    {
+        if (SymbolEqualityComparer.Default.Equals(holder, type)
+            && AttributePlace.PartAround(attribute, 0, cancellation) is { } part)
+        {
+            return part.Identifier.GetLocation();
+        }
+
+        return SymbolEqualityComparer.Default.Equals(holder.ContainingType, type)
+            && holder.Locations.Where(place => place.IsInSource).OrderBy(SourceOrder.Of).FirstOrDefault() is { } place
+            ? place
+            : AttributePlace.Of(attribute, cancellation);
+    }
+
+    private static void Report(SymbolAnalysisContext context, DeclaredFamily declared, Mistake mistake) =>
+        context.ReportDiagnostic(Diagnostic.Create(
+            mistake.Rule, AttributePlace.Of(declared.Attribute, mistake.Argument, context.CancellationToken), mistake.Values));
+}

@@ -1,0 +1,28 @@
+using System.Collections.Generic;
+using System.Linq;
+using GaussGen.Generator.Declarations;
+
+namespace GaussGen.Generator.Emission;
+
+/// <summary>A way to pass a function to a generated sum; each sum has one overload for either.</summary>
+/// <param name="Type">The type of the parameter.</param>
+/// <param name="TypeParameters">The type parameters of the method, with their brackets.</param>
+/// <param name="Constraint">The constraint on them.</param>
+internal sealed record IntegrandForm(string Type, string TypeParameters, string Constraint)
+{
+    private const string TypeParameter = "TIntegrand";
+
+    public bool IsGeneric => TypeParameters.Length > 0;
+
+    /// <summary>As a delegate, and as a struct that is compiled into the loop.</summary>
+    public static IEnumerable<IntegrandForm> Both(NumberType type) => new[]
+    {
+        new IntegrandForm($"global::System.Func<{type.Keyword}, {type.Keyword}>", string.Empty, string.Empty),
+        new IntegrandForm(
+            TypeParameter, $"<{TypeParameter}>", $"where {TypeParameter} : struct, global::GaussGen.IIntegrand<{type.Keyword}>"),
+    };
+
+    /// <summary>The signature of a method whose last parameter is the function.</summary>
+    public string SignatureAfter(IEnumerable<string> parameterTypes) =>
+        MethodSignature.Of(IsGeneric ? 1 : 0, parameterTypes.Append(IsGeneric ? "!0" : Type));
+}

@@ -1,0 +1,85 @@
+using System;
+using System.Collections.Generic;
+using System.Collections.Immutable;
+using System.IO;
+using System.Linq;
+using System.Threading;
+using System.Threading.Tasks;
+using GaussGen.Generator.Diagnostics;
+using Microsoft.CodeAnalysis;
+using Microsoft.CodeAnalysis.CSharp;
+using Microsoft.CodeAnalysis.Diagnostics;
+using Microsoft.CodeAnalysis.Text;
+
+namespace GaussGen.Generator.Tests.Support;
+
+/// <summary>A project that uses the generator: its sources and its settings. The settings are strict unless told otherwise.</summary>
+public sealed record Consumer(params string[] Sources)
+{
+    public Framework Framework { get; init; } = Framework.Net80;
+
+    public LanguageVersion LanguageVersion { get; init; } = LanguageVersion.Latest;
+
+    public NullableContextOptions Nullable { get; init; } = NullableContextOptions.Enable;
+
+    public string AssemblyName { get; init; } = "Boat";
+
+    public ImmutableArray<MetadataReference> OtherReferences { get; init; } = [];
+
+    public CSharpParseOptions ParseOptions => new(LanguageVersion, DocumentationMode.Diagnose);
+
+    public CSharpCompilation Compile() => CSharpCompilation.Create(
+        AssemblyName,
+        Sources.Select((text, index) => Parse(text, $"Source{index}.cs")),
+        Framework.References.Concat(OtherReferences),
+        new CSharpCompilationOptions(
+            OutputKind.DynamicallyLinkedLibrary,
+            generalDiagnosticOption: ReportDiagnostic.Error,
+            warningLevel: 9999,
+            nullableContextOptions: LanguageVersion >= LanguageVersion.CSharp8 ? Nullable : NullableContextOptions.Disable));
+
+    public SyntaxTree Parse(string text, string path) =>
+        CSharpSyntaxTree.ParseText(SourceText.From(text, System.Text.Encoding.UTF8), ParseOptions, path);
+
+    /// <summary>Runs the generator.</summary>
+    public Outcome Run() => Run(new TableGenerator());
+
+    /// <summary>Runs a generator.</summary>
+    public Outcome Run(IIncrementalGenerator generator)
+    {
+        GeneratorDriver driver = CSharpGeneratorDriver
+            .Create([generator.AsSourceGenerator()], parseOptions: ParseOptions)
+            .RunGeneratorsAndUpdateCompilation(Compile(), out Compilation compilation, out ImmutableArray<Diagnostic> diagnostics);
+        return new Outcome(driver.GetRunResult(), (CSharpCompilation)compilation, diagnostics);
+    }
+}
+
+/// <summary>What came out of a run of the generator.</summary>
+public sealed record Outcome(GeneratorDriverRunResult Result, CSharpCompilation Compilation, ImmutableArray<Diagnostic> GeneratorDiagnostics)
+{
+    /// <summary>The generated texts by hint name.</summary>
+    public ImmutableSortedDictionary<string, string> Texts => Result.Results
+        .SelectMany(result => result.GeneratedSources)
+        .ToImmutableSortedDictionary(source => source.HintName, source => source.SourceText.ToString(), StringComparer.Ordinal);
+
+    /// <summary>The text of the only generated file.</summary>
+    public string Text => Texts.Single().Value;
+
+    /// <summary>Everything that the compiler and the generator report above the level of a hint.</summary>
+    public IEnumerable<Diagnostic> CompilerDiagnostics => Compilation.GetDiagnostics()
+        .Concat(GeneratorDiagnostics)
+        .Where(diagnostic => diagnostic.Severity >= DiagnosticSeverity.Info);
+
+    /// <summary>Everything that the analyzer reports.</summary>
+    public Task<ImmutableArray<Diagnostic>> AnalyzerDiagnostics(DiagnosticAnalyzer? analyzer = null) => Compilation
+        .WithAnalyzers([analyzer ?? new DeclarationAnalyzer()])
+        .GetAnalyzerDiagnosticsAsync(CancellationToken.None);
+
+    /// <summary>The compiled assembly.</summary>
+    public byte[] Emit()
+    {
+        using MemoryStream stream = new();
+        Microsoft.CodeAnalysis.Emit.EmitResult emitted = Compilation.Emit(stream);
+        return emitted.Success ? stream.ToArray() : throw new InvalidOperationException(string.Join('\n', emitted.Diagnostics));
+    }
+}
