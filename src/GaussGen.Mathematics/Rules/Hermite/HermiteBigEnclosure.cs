@@ -1,3 +1,4 @@
+using System;
 using System.Numerics;
 using System.Threading;
 using GaussGen.Mathematics.Arithmetic;
@@ -10,14 +11,17 @@ namespace GaussGen.Mathematics.Rules.Hermite;
 /// </summary>
 internal static class HermiteBigEnclosure
 {
-    /// <summary>Bits that each term of the Taylor series gains on the one before: λ·1.1/2²⁵ ≤ 2⁻¹⁸ for n up to 1000.</summary>
+    /// <summary>Bits that each term of the Taylor series gains on the one before: λ·1.125/2²⁵ ≤ 2⁻¹⁸ for n up to 1000.</summary>
     private const int BitsPerTerm = 18;
 
     /// <summary>Bits that the recurrence and the roundings of the series may lose.</summary>
     private const int GuardBits = 64;
 
+    /// <summary>1.125·2⁻²⁵: as far from the point as the tails of the series are bounded, and farther than the zero can be.</summary>
+    private static readonly Dyadic Reach = new(9, -3 - HermiteRecurrence.PointBits);
+
     /// <summary>Balls around the zero next to the point, and around (n−1)!/(n·Heₙ₋₁²) there.</summary>
-    /// <param name="points">n, from 2 to 1000.</param>
+    /// <param name="points">n, from 3 to 1000.</param>
     /// <param name="point">X, where <see cref="HermiteEnclosure.TryEnclose"/> succeeded.</param>
     /// <param name="roots">√k at index k, up to n.</param>
     /// <param name="precision">The bits that are wanted; the relative radii are about 2^−precision or less.</param>
@@ -32,10 +36,15 @@ internal static class HermiteBigEnclosure
 
         // Newton's method on midpoints; its last result is an exact number like any other, and only its residual counts.
         Ball zero = Midpoint(Ball.Negate(ratio), working);
-        for (int bits = 2 * BitsPerTerm; bits < 2 * working; bits *= 2)
+        for (int bits = 2 * BitsPerTerm; bits < working; bits *= 2)
         {
-            (Ball residual, Ball derivative) = Evaluate(series, zero, System.Math.Min(working, 2 * bits), cancellation);
+            (Ball residual, Ball derivative) = Evaluate(series, zero, Math.Min(working, 2 * bits), cancellation);
             zero = Midpoint(Ball.Subtract(zero, Ball.Divide(residual, derivative, working), working), working);
+        }
+
+        if (Dyadic.Abs(zero.Center) > Reach)
+        {
+            throw new InvalidOperationException("Newton's method left the proven neighbourhood of a Hermite zero.");
         }
 
         // Theorem 7: |F′ − 1| ≤ 2⁻¹⁷ and |F″| ≤ 2⁷ where the zero can be.
@@ -66,10 +75,10 @@ internal static class HermiteBigEnclosure
         return series;
     }
 
-    /// <summary>F and F′ at an exact h within 1.1·2⁻²⁵ of 0, with the tails of both series.</summary>
+    /// <summary>F and F′ at an exact h within 1.125·2⁻²⁵ of 0, with the tails of both series.</summary>
     private static (Ball Value, Ball Slope) Evaluate(Ball[] series, Ball h, int working, CancellationToken cancellation)
     {
-        int terms = System.Math.Min(series.Length, (working / BitsPerTerm) + 3);
+        int terms = Math.Min(series.Length, (working / BitsPerTerm) + 3);
         Ball value = default, slope = default;
         for (int j = terms - 1; j >= 0; j--)
         {
@@ -87,7 +96,7 @@ internal static class HermiteBigEnclosure
         return (value.Enlarge(Bound.PowerOfTwo(tail - HermiteRecurrence.PointBits)), slope.Enlarge(Bound.PowerOfTwo(tail)));
     }
 
-    private static int TermPrecision(int working, int term) => System.Math.Max(64, working - (BitsPerTerm * (term - 1)));
+    private static int TermPrecision(int working, int term) => Math.Max(64, working - (BitsPerTerm * (term - 1)));
 
     private static Ball Midpoint(Ball value, int precision) => Ball.FromDyadic(value.Trim(precision).Center);
 

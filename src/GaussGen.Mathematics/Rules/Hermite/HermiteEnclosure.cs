@@ -21,7 +21,7 @@ internal static class HermiteEnclosure
     /// Encloses the zero next to the point and its weight. <c>false</c> where the point is too far from a zero to prove anything.
     /// Where it is <c>true</c>, exactly one zero lies within 1.1·2⁻²⁵ of the point (theorem 5).
     /// </summary>
-    /// <param name="points">n, at least 2.</param>
+    /// <param name="points">n, from 3 to 1000.</param>
     /// <param name="point">X, for x = X/2²⁵.</param>
     /// <param name="roots">√k at index k, up to n.</param>
     /// <param name="factor">(n−1)!/n.</param>

@@ -8,7 +8,7 @@ namespace GaussGen.Mathematics.Rules.Hermite;
 /// </summary>
 internal struct HermiteTaylor
 {
-    /// <summary>A bound of the roundings on the way to F and to F′, counted in section 4: 64 units.</summary>
+    /// <summary>Covers the roundings on the way to F and to F′, which section 4 counts.</summary>
     private const double Rounding = 64 * TaylorFixed.Unit;
 
     private const double LargestOffset = 1.05;
@@ -24,7 +24,7 @@ internal struct HermiteTaylor
     private long _b4;
     private long _b5;
 
-    /// <param name="points">n.</param>
+    /// <param name="points">n, from 3 to 1000.</param>
     /// <param name="point">X, for x = X/2²⁵.</param>
     /// <param name="u">F(0), at most 1 in magnitude.</param>
     internal HermiteTaylor(int points, uint point, TaylorFixed u)
@@ -108,7 +108,7 @@ internal struct HermiteTaylor
         long upper = 3 * _b3.Times(_point).ShiftRight(50).ToUnits();
         _b4 = (upper - _b2.Times(n - 2).ShiftRight(50).ToUnits()) / 12;
         upper = 4 * TaylorFixed.FromUnits(_b4).Times(_point).ShiftRight(50).ToUnits();
-        _b5 = (upper - ((n - 3L) * _b3.ShiftRight(50).ToUnits())) / 20;
+        _b5 = (upper - _b3.Times(n - 3).ShiftRight(50).ToUnits()) / 20;
     }
 
     /// <summary>Theorem 6.</summary>
