@@ -88,8 +88,8 @@ public sealed record NormalMomentsRequest : MomentRequest
 
     private MomentDescription Describe() => new(
         "the normal distribution with mean " + Write(Mean) + " and standard deviation " + Write(StandardDeviation),
-        "Raw and central moments and absolute moments of even order are exact rational numbers; absolute moments of odd order "
-            + "are a rational number times the square root of 2/π, enclosed.",
+        "raw, central and even absolute moments are exact rational numbers, odd absolute ones are a rational number times an "
+            + "enclosure of the square root of 2/π",
         "Stein 1981; Winkelbauer 2012; NIST DLMF 5.4");
 
     private static Dyadic ValueOf(double value) => BinaryFormat.Binary64.ValueOf(BitsOf(value)).Reduce();

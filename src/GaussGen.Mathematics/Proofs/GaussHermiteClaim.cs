@@ -1,0 +1,75 @@
+using System;
+using System.Globalization;
+using System.Threading;
+using GaussGen.Mathematics.Formats;
+
+namespace GaussGen.Mathematics.Proofs;
+
+/// <summary>The weight function of a Gauss–Hermite rule.</summary>
+public enum HermiteWeight
+{
+    /// <summary>exp(−x²/2)/√(2π), the density of the standard normal distribution; the nodes are the zeros of He (probabilists).</summary>
+    StandardNormalDensity,
+
+    /// <summary>exp(−x²); the nodes are the zeros of H (physicists).</summary>
+    ExponentialOfMinusSquare,
+}
+
+/// <summary>
+/// The claim to be a correctly rounded Gauss–Hermite rule: spans "Nodes" and "Weights", constants "PointCount" and
+/// "DegreeOfExactness" (2n−1, of the whole rule also where zero weights are dropped), and, where the data has them, "NodeScale" (1
+/// or √2) and "ReciprocalTotalWeight" (1 or 1/√π). Each entry is proven by <see cref="HermiteProof"/>.
+/// </summary>
+public sealed record GaussHermiteClaim : TableClaim
+{
+    /// <summary>The largest number of points.</summary>
+    public const int LargestPointCount = 1000;
+
+    /// <summary>A claim with the given promises.</summary>
+    /// <param name="points">The number of points, from 1 to <see cref="LargestPointCount"/>.</param>
+    /// <param name="weight">The weight function.</param>
+    /// <param name="format">The number format of nodes and weights.</param>
+    /// <param name="dropZeroWeights">Whether exactly the nodes whose weight rounds to zero are left out.</param>
+    /// <exception cref="ArgumentOutOfRangeException">The points or the weight are outside their range.</exception>
+    public GaussHermiteClaim(int points, HermiteWeight weight, BinaryFormat format, bool dropZeroWeights)
+        : base(format)
+    {
+        if (points is < 1 or > LargestPointCount)
+        {
+            string message = string.Format(
+                CultureInfo.InvariantCulture, "A Gauss–Hermite rule must have from 1 to {0} points.", LargestPointCount);
+            throw new ArgumentOutOfRangeException(nameof(points), points, message);
+        }
+
+        if (weight is not (HermiteWeight.StandardNormalDensity or HermiteWeight.ExponentialOfMinusSquare))
+        {
+            throw new ArgumentOutOfRangeException(nameof(weight), weight, "The weight must be one of the two Hermite weights.");
+        }
+
+        Points = points;
+        Weight = weight;
+        DropZeroWeights = dropZeroWeights;
+    }
+
+    /// <summary>The number of points before any is dropped.</summary>
+    public int Points { get; }
+
+    /// <summary>The weight function.</summary>
+    public HermiteWeight Weight { get; }
+
+    /// <summary>Whether exactly the nodes whose weight rounds to zero are left out.</summary>
+    public bool DropZeroWeights { get; }
+
+    /// <inheritdoc/>
+    public override string Title => string.Format(
+        CultureInfo.InvariantCulture,
+        "Gauss–Hermite rule with {0} {1}, {2}{3}",
+        Points,
+        Points == 1 ? "point" : "points",
+        Weight == HermiteWeight.StandardNormalDensity ? "standard normal density" : "weight exp(−x²)",
+        DropZeroWeights ? ", without zero weights" : string.Empty);
+
+    /// <inheritdoc/>
+    public override TableProof Prove(TableData data, IProgress<double>? progress, CancellationToken cancellation) =>
+        new HermiteProof(this, data).Run(progress, cancellation);
+}

@@ -1,0 +1,71 @@
+using System;
+using System.Globalization;
+using System.Threading;
+using GaussGen.Mathematics.Formats;
+
+namespace GaussGen.Mathematics.Proofs;
+
+/// <summary>
+/// The claim to be the correctly rounded moments of a normal distribution: spans "Raw", "Central" and "Absolute" by order from 0, and
+/// a constant for each entry, "Raw0", "Raw1" and so on. Each is proven by <see cref="NormalMomentsProof"/>.
+/// </summary>
+public sealed record NormalMomentsClaim : TableClaim
+{
+    /// <summary>The largest order.</summary>
+    public const int LargestOrder = 200;
+
+    /// <summary>A claim with the given promises.</summary>
+    /// <param name="mean">The mean, as the exact value of the binary64 number; finite.</param>
+    /// <param name="standardDeviation">The standard deviation, likewise; finite and above zero.</param>
+    /// <param name="maximumOrder">The highest order, from 0 to <see cref="LargestOrder"/>.</param>
+    /// <param name="format">The number format of the moments.</param>
+    /// <exception cref="ArgumentOutOfRangeException">A promise is outside its range.</exception>
+    public NormalMomentsClaim(double mean, double standardDeviation, int maximumOrder, BinaryFormat format)
+        : base(format)
+    {
+        if (double.IsNaN(mean) || double.IsInfinity(mean))
+        {
+            throw new ArgumentOutOfRangeException(nameof(mean), mean, "The mean must be finite.");
+        }
+
+        if (!(standardDeviation > 0) || double.IsInfinity(standardDeviation))
+        {
+            throw new ArgumentOutOfRangeException(
+                nameof(standardDeviation), standardDeviation, "The standard deviation must be finite and above zero.");
+        }
+
+        if (maximumOrder is < 0 or > LargestOrder)
+        {
+            string message = string.Format(CultureInfo.InvariantCulture, "The highest order must be from 0 to {0}.", LargestOrder);
+            throw new ArgumentOutOfRangeException(nameof(maximumOrder), maximumOrder, message);
+        }
+
+        Mean = mean;
+        StandardDeviation = standardDeviation;
+        MaximumOrder = maximumOrder;
+    }
+
+    /// <summary>The mean.</summary>
+    public double Mean { get; }
+
+    /// <summary>The standard deviation.</summary>
+    public double StandardDeviation { get; }
+
+    /// <summary>The highest order.</summary>
+    public int MaximumOrder { get; }
+
+    /// <inheritdoc/>
+    public override string Title => string.Format(
+        CultureInfo.InvariantCulture,
+        "Moments to order {0} of the normal distribution with mean {1} and standard deviation {2}",
+        MaximumOrder,
+        Write(Mean),
+        Write(StandardDeviation));
+
+    /// <inheritdoc/>
+    public override TableProof Prove(TableData data, IProgress<double>? progress, CancellationToken cancellation) =>
+        new NormalMomentsProof(this, data).Run(progress, cancellation);
+
+    private static string Write(double value) =>
+        ShortestDecimal.Write((ulong)BitConverter.DoubleToInt64Bits(value), BinaryFormat.Binary64);
+}
