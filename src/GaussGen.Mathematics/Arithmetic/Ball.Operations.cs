@@ -66,6 +66,11 @@ public readonly partial struct Ball
             radius += (Bound.FromMagnitude(right.Midpoint, right.Exponent) + right.Radius) * left.Radius;
         }
 
+        if (left.Midpoint.IsZero || right.Midpoint.IsZero)
+        {
+            return new Ball(BigInteger.Zero, 0, radius);
+        }
+
         int length = Magnitude.BitLength(left.Midpoint) + Magnitude.BitLength(right.Midpoint) - 1;
         return Rounded(left.Midpoint * right.Midpoint, checked(left.Exponent + right.Exponent), radius, precision, length);
     }
@@ -82,7 +87,7 @@ public readonly partial struct Ball
         Bound radius = value.Radius.IsZero
             ? default
             : (Bound.FromMagnitude(value.Midpoint, checked(value.Exponent + 1)) + value.Radius) * value.Radius;
-        int length = (2 * Magnitude.BitLength(value.Midpoint)) - 1;
+        int length = Math.Max(0, (2 * Magnitude.BitLength(value.Midpoint)) - 1);
         return Rounded(value.Midpoint * value.Midpoint, checked(2 * value.Exponent), radius, precision, length);
     }
 
@@ -135,8 +140,9 @@ public readonly partial struct Ball
 
         if (value.ContainsZero)
         {
-            Ball top = Sqrt(FromDyadic(value.Upper), precision);
-            return FromEndpoints(Dyadic.Zero, top.Upper, precision);
+            int working = Math.Max(precision, 32);
+            Ball top = Sqrt(FromDyadic(value.Upper), working);
+            return FromEndpoints(Dyadic.Zero, top.Upper, working);
         }
 
         // An even exponent, and enough bits that the root has the precision.

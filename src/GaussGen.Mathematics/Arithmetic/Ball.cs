@@ -127,7 +127,10 @@ public readonly partial struct Ball
     }
 
     /// <summary>Whether every number in the first ball is below every number in the second.</summary>
-    public static Trilean IsLess(Ball left, Ball right) => Subtract(right, left, int.MaxValue).IsPositive;
+    public static Trilean IsLess(Ball left, Ball right) => !left.IsFinite || !right.IsFinite ? Trilean.Unknown
+        : left.Upper < right.Lower ? Trilean.True
+        : left.Lower >= right.Upper ? Trilean.False
+        : Trilean.Unknown;
 
     /// <summary>Whether the number is in the ball.</summary>
     public bool Contains(Dyadic value) => !IsFinite || (Lower <= value && value <= Upper);

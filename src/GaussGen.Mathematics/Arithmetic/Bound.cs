@@ -6,7 +6,7 @@ namespace GaussGen.Mathematics.Arithmetic;
 
 /// <summary>
 /// An upper bound of a magnitude: mantissa · 2^exponent with a mantissa of 32 bits, or infinite. Every operation rounds up, by
-/// at most one part in 2³¹, and works on integers only. The default value is zero.
+/// less than one part in 2²⁹, and works on integers only. The default value is zero.
 /// </summary>
 public readonly struct Bound : IEquatable<Bound>, IComparable<Bound>
 {
