@@ -138,6 +138,28 @@ public sealed class ConsumerTests(PackedLibrary package, ITestOutputHelper log)
         AssertWithinFourUlps(1, double.Parse(values["totalWeight"], CultureInfo.InvariantCulture));
     }
 
+    [Theory]
+    [InlineData("7.3", "[GaussHermite(7)]", "GAUSS013")]
+    [InlineData("9", "[GaussHermite(0)]", "GAUSS004")]
+    [InlineData("latest", "[GaussHermite(1001)]", "GAUSS004")]
+    public void One_mistake_gives_one_error(string language, string attribute, string expected)
+    {
+        Stranger stranger = new(package, $"mistake-{language}");
+        string source = SounderLibrary.Replace("[GaussHermite(7)]", attribute, StringComparison.Ordinal);
+        string library = stranger.AddProject(
+            "Sounder", $"<TargetFramework>netstandard2.0</TargetFramework><LangVersion>{language}</LangVersion>", source);
+        CommandResult build = stranger.Dotnet("build", library);
+        Assert.NotEqual(0, build.ExitCode);
+        // The build prints each error when it meets it and again in its summary.
+        int line = source[..source.IndexOf(attribute, StringComparison.Ordinal)].Count(character => character == '\n') + 1;
+        string[] errors = [.. build.Output.Split('\n').Where(text => text.Contains(": error ", StringComparison.Ordinal)).Distinct()];
+        Assert.True(
+            errors.Length == 1
+            && errors[0].Contains($"Source.cs({line},", StringComparison.Ordinal)
+            && errors[0].Contains($": error {expected}: ", StringComparison.Ordinal),
+            build.Output);
+    }
+
     private static string ProgramFor(string framework) =>
         $"<OutputType>Exe</OutputType><TargetFramework>{framework}</TargetFramework><Nullable>enable</Nullable>";
 
