@@ -23,15 +23,25 @@ public sealed class AllocationTests
     {
         Assert.Equal(0, Measure(static () => RuleEvaluation.Symmetric(Nodes, Weights, 1.0, 0.5, new Echo(2.0, 0.3))));
         Assert.Equal(0, Measure(static () => RuleEvaluation.General(Nodes, Weights, 1.0, 0.5, new Echo(2.0, 0.3))));
-        Assert.Equal(0, Measure(static () => RuleEvaluation.Symmetric(SingleNodes, SingleWeights, 1.0f, 0.5f, new Echo(2.0, 0.3))));
-        Assert.Equal(0, Measure(static () => RuleEvaluation.General(SingleNodes, SingleWeights, 1.0f, 0.5f, new Echo(2.0, 0.3))));
+        Assert.Equal(0, Measure(static () => RuleEvaluation.Symmetric(SingleNodes, SingleWeights, 1.0f, 0.5f, new Identity())));
+        Assert.Equal(0, Measure(static () => RuleEvaluation.General(SingleNodes, SingleWeights, 1.0f, 0.5f, new Identity())));
     }
 
     [ReleaseFact]
     public void A_delegate_that_exists_already_allocates_nothing()
     {
-        Assert.Equal(0, Measure(static () => RuleEvaluation.Symmetric(Nodes, Weights, 1.0, 0.5, static x => 1.0 / (1.0 + (x * x)))));
+        Assert.Equal(0, Measure(static () => RuleEvaluation.Symmetric(Nodes, Weights, 1.0, 0.5, static x => 1.0 / (1.0 + x))));
         Assert.Equal(0, Measure(static () => RuleEvaluation.General(SingleNodes, SingleWeights, 1.0f, 0.5f, static x => x * x)));
+    }
+
+    [ReleaseFact]
+    public void A_generated_expectation_allocates_nothing()
+    {
+        Assert.Equal(0, Measure(static () => Seven.Expectation(1.0, 0.5, new Echo(2.0, 0.3))));
+        Assert.Equal(0, Measure(static () => Seven.Expectation(1.0, 0.5, static x => x * x)));
+        Assert.Equal(0, Measure(static () => SixteenPhysicist.Integral(new Echo(2.0, 0.3))));
+        Assert.Equal(0, Measure(static () => TwentySingle.Expectation(1.0f, 0.5f, new Echo(2.0, 0.3))));
+        Assert.Equal(0, Measure(static () => Seven.Nodes[3] + Seven.Weights[3] + Wind.Raw[2] + Wind.Absolute1));
     }
 
     [ReleaseFact]

@@ -56,7 +56,8 @@ public sealed class AttributeTests
     [Fact]
     public void Declared_moments_can_be_read_back_without_running_the_attribute()
     {
-        CustomAttributeData data = typeof(Wind).GetCustomAttributesData().Single(a => a.AttributeType == typeof(NormalMomentsAttribute));
+        CustomAttributeData data = typeof(Wind).GetCustomAttributesData()
+            .Single(a => a.AttributeType == typeof(NormalMomentsAttribute));
         Assert.Equal([1.5, 0.25], data.ConstructorArguments.Select(a => (double)a.Value!));
         CustomAttributeNamedArgument order = Assert.Single(data.NamedArguments);
         Assert.Equal(nameof(NormalMomentsAttribute.MaximumOrder), order.MemberName);

@@ -23,6 +23,9 @@ internal static class CompiledCodeProbes
         _ = EvenGeneral(1.0, 0.5);
         _ = OddSymmetric(1.0f, 0.5f);
         _ = OddGeneral(1.0f, 0.5f);
+        _ = GeneratedEven(1.0, 0.5);
+        _ = GeneratedOdd(1.0, 0.5);
+        _ = GeneratedSingle(1.0f, 0.5f);
         _ = Unprotected(EvenNodes, 8);
     }
 
@@ -41,6 +44,18 @@ internal static class CompiledCodeProbes
     [MethodImpl(MethodImplOptions.NoInlining)]
     public static float OddGeneral(float mean, float scale) =>
         RuleEvaluation.General(OddNodes, OddWeights, mean, scale, new Echo(2.0, 0.3));
+
+    [MethodImpl(MethodImplOptions.NoInlining)]
+    public static double GeneratedEven(double mean, double deviation) =>
+        SixteenPhysicist.Expectation(mean, deviation, new Echo(2.0, 0.3));
+
+    [MethodImpl(MethodImplOptions.NoInlining)]
+    public static double GeneratedOdd(double mean, double deviation) =>
+        Seven.Expectation(mean, deviation, new Echo(2.0, 0.3));
+
+    [MethodImpl(MethodImplOptions.NoInlining)]
+    public static float GeneratedSingle(float mean, float deviation) =>
+        TwentySingle.Expectation(mean, deviation, new Echo(2.0, 0.3));
 
     /// <summary>A loop that the JIT cannot prove safe, to show that a bounds check would be seen.</summary>
     [MethodImpl(MethodImplOptions.NoInlining)]

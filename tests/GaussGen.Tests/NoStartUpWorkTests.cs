@@ -1,17 +1,44 @@
 using System;
 using System.Linq;
+using System.Reflection;
 using Xunit;
 
 namespace GaussGen.Tests;
 
-/// <summary>Nothing may run before the first call: a type initializer would, and it would make every access check for it.</summary>
+/// <summary>Nothing may run before the first call. A type initializer would, and every access would check for it.</summary>
 public sealed class NoStartUpWorkTests
 {
+    private static readonly DateTime ForControl = DateTime.UnixEpoch;
+
+    [Fact]
+    public void A_type_initializer_would_be_seen()
+    {
+        Assert.Equal(1970, ForControl.Year);
+        Assert.NotNull(typeof(NoStartUpWorkTests).TypeInitializer);
+    }
+
     [Fact]
     public void The_library_has_no_type_initializer()
     {
         Type[] types = typeof(RuleEvaluation).Assembly.GetTypes();
         Assert.Contains(types, type => type.IsNested);
         Assert.Empty(types.Where(type => type.TypeInitializer is not null).Select(type => type.FullName));
+    }
+
+    [Fact]
+    public void No_generated_type_has_a_type_initializer_or_a_field_that_needs_one()
+    {
+        Type[] tables =
+        [
+            .. typeof(Seven).Assembly.GetTypes().Where(type =>
+                type.IsDefined(typeof(GaussHermiteAttribute), inherit: false)
+                || type.IsDefined(typeof(NormalMomentsAttribute), inherit: false)),
+        ];
+        Assert.True(tables.Length >= 8, $"{tables.Length} tables");
+        Assert.Empty(tables.Where(type => type.TypeInitializer is not null).Select(type => type.FullName));
+
+        const BindingFlags statics = BindingFlags.Static | BindingFlags.Public | BindingFlags.NonPublic;
+        FieldInfo[] fields = [.. tables.SelectMany(type => type.GetFields(statics))];
+        Assert.Empty(fields.Where(field => !field.IsLiteral).Select(field => field.Name));
     }
 }

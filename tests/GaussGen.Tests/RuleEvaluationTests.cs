@@ -42,7 +42,8 @@ public sealed class RuleEvaluationTests
     public void A_cubic_has_the_expectation_of_its_closed_form()
     {
         // E (a v³ + b v² + c v + d) = a(μ³ + 3μσ²) + b(μ² + σ²) + cμ + d.
-        Gen.Select(Gen.Double[-50, 50], Gen.Double[0, 20], Gen.Double[-2, 2].Array[4], Gen.Int[2, 5]).Sample((mean, deviation, c, points) =>
+        var distributions = Gen.Select(Gen.Double[-50, 50], Gen.Double[0, 20], Gen.Double[-2, 2].Array[4], Gen.Int[2, 5]);
+        distributions.Sample((mean, deviation, c, points) =>
         {
             (double[] nodes, double[] weights) = SmallRules.Get(points);
             double variance = deviation * deviation;
@@ -95,9 +96,10 @@ public sealed class RuleEvaluationTests
     {
         double[] nodes = [0.5, 1.5, 4.0, 7.0];
         double[] weights = [0.125, 0.5, 0.25, 2.0];
-        double value = RuleEvaluation.General(nodes, weights, 1.0, 2.0, new Polynomial(1.0, 0.0, 0.0));
+        Polynomial square = new(1.0, 0.0, 0.0);
+        double value = RuleEvaluation.General(nodes, weights, 1.0, 2.0, square);
         Assert.Equal((0.125 * 4.0) + (0.5 * 16.0) + (0.25 * 81.0) + (2.0 * 225.0), value);
-        float single = RuleEvaluation.General([0.5f, 1.5f, 4.0f], [0.125f, 0.5f, 0.25f], 1.0f, 2.0f, new Polynomial(1.0, 0.0, 0.0));
+        float single = RuleEvaluation.General([0.5f, 1.5f, 4.0f], [0.125f, 0.5f, 0.25f], 1.0f, 2.0f, square);
         Assert.Equal((0.125f * 4.0f) + (0.5f * 16.0f) + (0.25f * 81.0f), single);
     }
 
