@@ -18,6 +18,9 @@ namespace GaussGen.Generator;
 [Generator(LanguageNames.CSharp)]
 public sealed class TableGenerator : IIncrementalGenerator
 {
+    // Without a byte order mark, as editors and version control like it.
+    private static readonly Encoding FileEncoding = new UTF8Encoding(encoderShouldEmitUTF8Identifier: false);
+
     private readonly ImmutableArray<Family> _families;
 
     /// <summary>A generator for every family in the declaration table.</summary>
@@ -69,5 +72,5 @@ public sealed class TableGenerator : IIncrementalGenerator
         new(HintName.Of(declaration, caseTwins), FilePrinter.Print(declaration, target, cancellation));
 
     private static void AddToCompilation(SourceProductionContext context, GeneratedFile file) =>
-        context.AddSource(file.HintName, SourceText.From(file.Text, Encoding.UTF8));
+        context.AddSource(file.HintName, SourceText.From(file.Text, FileEncoding));
 }

@@ -75,7 +75,7 @@ internal static class DiagnosticDescriptors
     public static readonly DiagnosticDescriptor ZeroWeights = new(
         "GAUSS012",
         "Weights round to zero",
-        "{0} of the {1} weights round to zero in {2}, from magnitude {3} of the node outwards; set DropZeroWeights = true to leave those nodes out, or ask for fewer points",
+        "{0} of the {1} weights round to zero in {2}, those of the nodes of magnitude {3} and more; set DropZeroWeights = true to leave those nodes out, or ask for fewer points",
         Category.Range,
         DiagnosticSeverity.Warning,
         isEnabledByDefault: true,

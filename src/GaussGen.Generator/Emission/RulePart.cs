@@ -44,9 +44,9 @@ internal static class RulePart
 
     private static string ZeroWeights(RoundedRule rule, NumberType type, RoundedValue first)
     {
-        string which = $"{Count(rule.ZeroWeights, "weight")} of {Text(rule.Table.Nodes.Count)}, from magnitude {type.Literal(first)} of the node outwards";
+        string which = $"{Text(rule.ZeroWeights)} of {Count(rule.Table.Nodes.Count, "weight")}, those of the nodes of magnitude {type.Literal(first)} and more";
         return rule.Nodes.Count < rule.Table.Nodes.Count
-            ? $"Left out: the nodes whose weight rounds to zero in {type.Format.Name} ({which})."
+            ? $"Nodes whose weight rounds to zero in {type.Format.Name} are left out: {which}."
             : $"Some weights round to zero in {type.Format.Name}: {which}.";
     }
 

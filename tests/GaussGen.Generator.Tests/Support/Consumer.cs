@@ -13,7 +13,7 @@ using Microsoft.CodeAnalysis.Text;
 
 namespace GaussGen.Generator.Tests.Support;
 
-/// <summary>A project that uses the generator: its sources and its settings. The settings are strict unless told otherwise.</summary>
+/// <summary>A project that uses the generator: its sources and its settings. Warnings are errors.</summary>
 public sealed record Consumer(params string[] Sources)
 {
     public Framework Framework { get; init; } = Framework.Net80;
@@ -26,7 +26,10 @@ public sealed record Consumer(params string[] Sources)
 
     public ImmutableArray<MetadataReference> OtherReferences { get; init; } = [];
 
-    public CSharpParseOptions ParseOptions => new(LanguageVersion, DocumentationMode.Diagnose);
+    /// <summary>Diagnose is what a project gets that writes a documentation file.</summary>
+    public DocumentationMode Documentation { get; init; } = DocumentationMode.Parse;
+
+    public CSharpParseOptions ParseOptions => new(LanguageVersion, Documentation);
 
     public CSharpCompilation Compile() => CSharpCompilation.Create(
         AssemblyName,
@@ -45,12 +48,15 @@ public sealed record Consumer(params string[] Sources)
     public Outcome Run() => Run(new TableGenerator());
 
     /// <summary>Runs a generator.</summary>
-    public Outcome Run(IIncrementalGenerator generator)
+    public Outcome Run(IIncrementalGenerator generator) => Run(generator, Compile(), ParseOptions);
+
+    /// <summary>Runs a generator on a compilation.</summary>
+    public static Outcome Run(IIncrementalGenerator generator, CSharpCompilation compilation, CSharpParseOptions parseOptions)
     {
         GeneratorDriver driver = CSharpGeneratorDriver
-            .Create([generator.AsSourceGenerator()], parseOptions: ParseOptions)
-            .RunGeneratorsAndUpdateCompilation(Compile(), out Compilation compilation, out ImmutableArray<Diagnostic> diagnostics);
-        return new Outcome(driver.GetRunResult(), (CSharpCompilation)compilation, diagnostics);
+            .Create([generator.AsSourceGenerator()], parseOptions: parseOptions)
+            .RunGeneratorsAndUpdateCompilation(compilation, out Compilation updated, out ImmutableArray<Diagnostic> diagnostics);
+        return new Outcome(driver.GetRunResult(), (CSharpCompilation)updated, diagnostics);
     }
 }
 

@@ -1,6 +1,5 @@
 using System.Collections.Generic;
 using System.Globalization;
-using System.IO;
 using System.Linq;
 using System.Numerics;
 using GaussGen.Mathematics.Arithmetic;
@@ -29,12 +28,9 @@ public sealed record ReferenceValue(string Function, Dyadic Argument, Rational V
 
     private static List<ReferenceValue> Read()
     {
-        using Stream stream = typeof(ReferenceValue).Assembly.GetManifestResourceStream("elementary-values.txt")!;
-        using var reader = new StreamReader(stream);
         var values = new List<ReferenceValue>();
-        while (reader.ReadLine() is { } line)
+        foreach (string[] parts in ReferenceData.Words("elementary-values.txt"))
         {
-            string[] parts = line.Split(' ');
             var digits = BigInteger.Parse(parts[3], CultureInfo.InvariantCulture);
             Rational scale = new Rational(10, 1).Pow(int.Parse(parts[4], CultureInfo.InvariantCulture));
             var argument = new Dyadic(BigInteger.Parse(parts[1], CultureInfo.InvariantCulture), int.Parse(parts[2], CultureInfo.InvariantCulture));

@@ -1,5 +1,4 @@
 using System;
-using System.Numerics;
 using System.Threading;
 using GaussGen.Mathematics.Arithmetic;
 
@@ -21,15 +20,15 @@ internal static class HermiteBigEnclosure
     private static readonly Dyadic Reach = new(9, -3 - HermiteRecurrence.PointBits);
 
     /// <summary>Balls around the zero next to the point, and around (n−1)!/(n·Heₙ₋₁²) there.</summary>
-    /// <param name="points">n, from 3 to 1000.</param>
+    /// <param name="rule">The rule, with n from 3 to 1000 nodes.</param>
     /// <param name="point">X, where <see cref="HermiteEnclosure.TryEnclose"/> succeeded.</param>
-    /// <param name="roots">√k at index k, up to n.</param>
     /// <param name="precision">The bits that are wanted; the relative radii are about 2^−precision or less.</param>
     /// <param name="cancellation">Looked at between terms and steps.</param>
-    internal static (Ball Node, Ball Weight) Enclose(int points, uint point, double[] roots, int precision, CancellationToken cancellation)
+    internal static (Ball Node, Ball Weight) Enclose(HermiteFamilyMember rule, uint point, int precision, CancellationToken cancellation)
     {
+        int points = rule.Points;
         int working = checked(precision + GuardBits);
-        (Ball value, Ball lower) = HermiteBigRecurrence.Evaluate(points, point, roots, working, cancellation);
+        (Ball value, Ball lower) = HermiteBigRecurrence.Evaluate(points, point, rule.Roots, working, cancellation);
         Ball x = new(point, -HermiteRecurrence.PointBits, Bound.Zero);
         Ball ratio = Ball.Divide(value, Ball.Multiply(lower, Ball.FromInteger(points), working), working);
         Ball[] series = Coefficients(points, x, ratio, working, cancellation);
@@ -54,7 +53,7 @@ internal static class HermiteBigEnclosure
         Ball node = Ball.Add(x, zero.Enlarge(distance), working);
         Ball atZero = Ball.Multiply(lower, slope.Enlarge(distance.ScaleByPowerOfTwo(7)), working);
         Ball square = Ball.Multiply(Ball.FromInteger(points), Ball.Square(atZero, working), working);
-        return (node, Ball.Divide(Ball.FromInteger(Factorial(points - 1)), square, working));
+        return (node, Ball.Divide(Ball.FromInteger(rule.Factorial), square, working));
     }
 
     /// <summary>c₀ = u, c₁ = 1 and (j+1)(j+2)·c_{j+2} = (j+1)·x·c_{j+1} − (n−j)·c_j, as many as the precision needs.</summary>
@@ -99,15 +98,4 @@ internal static class HermiteBigEnclosure
     private static int TermPrecision(int working, int term) => Math.Max(64, working - (BitsPerTerm * (term - 1)));
 
     private static Ball Midpoint(Ball value, int precision) => Ball.FromDyadic(value.Trim(precision).Center);
-
-    private static BigInteger Factorial(int n)
-    {
-        BigInteger product = BigInteger.One;
-        for (int k = 2; k <= n; k++)
-        {
-            product *= k;
-        }
-
-        return product;
-    }
 }

@@ -1,19 +1,38 @@
+using System.Numerics;
 using System.Threading;
 using GaussGen.Mathematics.Arithmetic;
 
 namespace GaussGen.Mathematics.Rules.Hermite;
 
-/// <summary>What the nodes and weights of one rule have in common.</summary>
+/// <summary>What the nodes and weights of one rule have in common. Thread-safe.</summary>
 /// <param name="points">n.</param>
 /// <param name="convention">The weight function.</param>
 /// <param name="roots">√k at index k, from 0 to n.</param>
 internal sealed class HermiteFamilyMember(int points, HermiteConvention convention, double[] roots)
 {
+    private Boxed? _factorial;
+
     internal int Points { get; } = points;
 
     internal HermiteConvention Convention { get; } = convention;
 
     internal double[] Roots { get; } = roots;
+
+    /// <summary>(n−1)!, computed when it is first asked for.</summary>
+    internal BigInteger Factorial => (_factorial ??= new Boxed(Product(Points - 1))).Value;
+
+    private static BigInteger Product(int last)
+    {
+        BigInteger product = BigInteger.One;
+        for (int k = 2; k <= last; k++)
+        {
+            product *= k;
+        }
+
+        return product;
+    }
+
+    private sealed record Boxed(BigInteger Value);
 }
 
 /// <summary>A positive zero of Heₙ with its weight, both in the rule's convention. Thread-safe.</summary>
@@ -51,7 +70,7 @@ internal sealed class HermiteZero(HermiteFamilyMember rule, uint point, FixedBal
     {
         for (int asked = precision + 8; ; asked += 64)
         {
-            (Ball node, Ball weight) = HermiteBigEnclosure.Enclose(rule.Points, point, rule.Roots, asked, cancellation);
+            (Ball node, Ball weight) = HermiteBigEnclosure.Enclose(rule, point, asked, cancellation);
             if (rule.Convention == HermiteConvention.Physicist)
             {
                 node = Ball.Divide(node, Constants.Sqrt2(asked + 8), asked + 8);

@@ -1,6 +1,6 @@
-"""Writes hermite_reference.txt: Gauss-Hermite nodes and weights to 60 significant digits by mpmath 1.3.
+"""Writes hermite-reference.csv: Gauss-Hermite nodes and weights to 60 significant digits by mpmath 1.3.
 
-Usage: python3 hermite_reference.py > hermite_reference.txt
+Usage: python3 hermite-reference.py > hermite-reference.csv
 
 Independent of the library under test in method and in arithmetic: the zeros are bracketed by the sign changes of the
 polynomial in its explicit power form (exact integers), refined by bisection and Newton's method with 400 digits, and the
@@ -72,16 +72,17 @@ def christoffel(n, x):
 
 def main():
     out = sys.stdout
-    out.write("# points convention node weight (nodes from 0 up; made by hermite_reference.py with mpmath)\n")
+    out.write("# made by hermite-reference.py with mpmath; nodes from 0 up; do not edit\n")
+    out.write("points,convention,node,weight\n")
     for n in (7, 20, 64, 200):
         nodes = ([mpf(0)] if n % 2 else []) + positive_zeros(n)
         assert len(nodes) == (n + 1) // 2
         weights = [christoffel(n, x) for x in nodes]
         total = sum(2 * w if x else w for x, w in zip(nodes, weights))
         assert abs(total - 1) < mpf(10) ** -100
-        for name, node_factor, weight_factor in (("probabilist", mpf(1), mpf(1)), ("physicist", 1 / sqrt(mpf(2)), sqrt(pi))):
+        for name, node_factor, weight_factor in (("Probabilist", mpf(1), mpf(1)), ("Physicist", 1 / sqrt(mpf(2)), sqrt(pi))):
             for x, w in zip(nodes, weights):
-                out.write("%d %s %s %s\n" % (
+                out.write("%d,%s,%s,%s\n" % (
                     n, name, nstr(x * node_factor, 60, strip_zeros=False), nstr(w * weight_factor, 60, strip_zeros=False)))
 
 
