@@ -32,7 +32,8 @@ internal sealed class NormalMomentsProof
 
     private readonly NormalMomentsClaim _claim;
     private readonly ProofReport _report;
-    private readonly Dyadic[] _meanPowers;
+    private readonly Dyadic _mean;
+    private readonly Dyadic _meanSquared;
     private readonly Dyadic[] _standardDeviationPowers;
     private readonly BigInteger[] _factorials;
 
@@ -40,8 +41,9 @@ internal sealed class NormalMomentsProof
     {
         _claim = claim;
         _report = new ProofReport(claim, data);
-        _meanPowers = Powers(claim.Mean, claim.MaximumOrder);
-        _standardDeviationPowers = Powers(claim.StandardDeviation, claim.MaximumOrder);
+        _mean = ValueOf(claim.Mean);
+        _meanSquared = _mean * _mean;
+        _standardDeviationPowers = Powers(ValueOf(claim.StandardDeviation), claim.MaximumOrder);
         _factorials = new BigInteger[claim.MaximumOrder + 1];
         _factorials[0] = BigInteger.One;
         for (int k = 1; k <= claim.MaximumOrder; k++)
@@ -81,18 +83,18 @@ internal sealed class NormalMomentsProof
         }
     }
 
+    /// <summary>The sum of the remarks as a polynomial in m², by Horner's scheme.</summary>
     private Dyadic Raw(int order, CancellationToken cancellation)
     {
         Dyadic sum = Dyadic.Zero;
-        for (int j = order / 2; j >= 0; j--)
+        for (int j = 0; j <= order / 2; j++)
         {
             cancellation.ThrowIfCancellationRequested();
             BigInteger coefficient = _factorials[order] / ((_factorials[order - (2 * j)] * _factorials[j]) << j);
-            Dyadic powers = _meanPowers[order - (2 * j)] * _standardDeviationPowers[2 * j];
-            sum += new Dyadic(coefficient, 0) * powers;
+            sum = (sum * _meanSquared) + (new Dyadic(coefficient, 0) * _standardDeviationPowers[2 * j]);
         }
 
-        return sum;
+        return order % 2 == 0 ? sum : sum * _mean;
     }
 
     private Dyadic Even(int order) =>
@@ -117,9 +119,11 @@ internal sealed class NormalMomentsProof
 
     private KnownNumber Exact(Dyadic value) => new(value, value, NearestValue.Of(_claim.Format, Ball.FromDyadic(value)));
 
-    private static Dyadic[] Powers(double value, int count)
+    private static Dyadic ValueOf(double value) =>
+        BinaryFormat.Binary64.ValueOf((ulong)BitConverter.DoubleToInt64Bits(value)).Reduce();
+
+    private static Dyadic[] Powers(Dyadic factor, int count)
     {
-        Dyadic factor = BinaryFormat.Binary64.ValueOf((ulong)BitConverter.DoubleToInt64Bits(value)).Reduce();
         var powers = new Dyadic[count + 1];
         powers[0] = new Dyadic(BigInteger.One, 0);
         for (int k = 1; k <= count; k++)
