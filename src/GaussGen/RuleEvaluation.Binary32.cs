@@ -138,7 +138,7 @@ public static partial class RuleEvaluation
         }
 
         // Each half runs towards the middle with a sum of its own. Every loop is limited by the common length of the pieces it
-        // reads: that is what lets the JIT drop the bounds checks.
+        // reads: that is what lets the JIT drop the bounds checks. The unsigned comparison ends the downward loop below 0.
         int half = nodes.Length / 2;
         ReadOnlySpan<float> lowNodes = nodes.Slice(0, half);
         ReadOnlySpan<float> lowWeights = weights.Slice(0, half);
@@ -151,7 +151,7 @@ public static partial class RuleEvaluation
         ReadOnlySpan<float> highNodes = nodes.Slice(nodes.Length - half, half);
         ReadOnlySpan<float> highWeights = weights.Slice(nodes.Length - half, half);
         float high = 0.0f;
-        for (int i = highNodes.Length - 1; i >= 0; i--)
+        for (int i = highNodes.Length - 1; (uint)i < (uint)highNodes.Length; i--)
         {
             high += highWeights[i] * integrand.Evaluate(mean + (scale * highNodes[i]));
         }
