@@ -22,9 +22,7 @@ public sealed record Consumer(params string[] Sources)
 
     public NullableContextOptions Nullable { get; init; } = NullableContextOptions.Enable;
 
-    public bool AllowUnsafe { get; init; }
-
-    public string AssemblyName { get; init; } = Framework.DefaultAssemblyName;
+    public string AssemblyName { get; init; } = "Boat";
 
     public ImmutableArray<MetadataReference> OtherReferences { get; init; } = [];
 
@@ -33,18 +31,15 @@ public sealed record Consumer(params string[] Sources)
 
     public CSharpParseOptions ParseOptions => new(LanguageVersion, Documentation);
 
-    public CSharpCompilation Compile() => Framework.Empty
-        .WithAssemblyName(AssemblyName)
-        .AddReferences(OtherReferences)
-        .WithOptions(new CSharpCompilationOptions(
+    public CSharpCompilation Compile() => CSharpCompilation.Create(
+        AssemblyName,
+        Sources.Select((text, index) => Parse(text, $"Source{index}.cs")),
+        Framework.References.Concat(OtherReferences),
+        new CSharpCompilationOptions(
             OutputKind.DynamicallyLinkedLibrary,
             generalDiagnosticOption: ReportDiagnostic.Error,
             warningLevel: 9999,
-            allowUnsafe: AllowUnsafe,
-            nullableContextOptions: LanguageVersion.MapSpecifiedToEffectiveVersion() >= LanguageVersion.CSharp8
-                ? Nullable
-                : NullableContextOptions.Disable))
-        .AddSyntaxTrees(Sources.Select((text, index) => Parse(text, $"Source{index}.cs")));
+            nullableContextOptions: LanguageVersion >= LanguageVersion.CSharp8 ? Nullable : NullableContextOptions.Disable));
 
     public SyntaxTree Parse(string text, string path) =>
         CSharpSyntaxTree.ParseText(SourceText.From(text, System.Text.Encoding.UTF8), ParseOptions, path);

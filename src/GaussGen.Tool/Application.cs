@@ -1,0 +1,61 @@
+using System;
+using System.Collections.Generic;
+using System.Threading;
+using System.Threading.Tasks;
+using GaussGen.Tool.Commands;
+using GaussGen.Tool.Output;
+using GaussGen.Tool.Reports;
+using GaussGen.Tool.Verification;
+using Spectre.Console.Cli;
+
+namespace GaussGen.Tool;
+
+/// <summary>The command line: its verbs, and what becomes of what goes wrong.</summary>
+internal static class Application
+{
+    /// <summary>Runs one command line and returns the exit code.</summary>
+    public static async Task<int> RunAsync(IReadOnlyList<string> arguments, Terminal terminal, CancellationToken cancellation)
+    {
+        CommandApp application = new();
+        application.Configure(configuration =>
+        {
+            _ = configuration
+                .SetApplicationName(ToolIdentity.Name)
+                .SetApplicationVersion(ToolIdentity.Version)
+                .ConfigureConsole(terminal.Results)
+                .UseStrictParsing()
+                .PropagateExceptions();
+            _ = configuration.AddCommand<VerifyCommand>("verify")
+                .WithDescription("Prove every table of compiled assemblies, without running them.")
+                .WithExample("verify", "bin/Release/net8.0/SurveyBoat.dll")
+                .WithExample("verify", "bin/Release", "--sarif", "proofs.sarif", "--junit", "proofs.xml")
+                .WithData(terminal);
+        });
+
+        try
+        {
+            if (arguments.Count == 0)
+            {
+                _ = await application.RunAsync(["--help"], cancellation).ConfigureAwait(false);
+                return ExitCode.NotRead;
+            }
+
+            return await application.RunAsync(arguments, cancellation).ConfigureAwait(false);
+        }
+        catch (OperationCanceledException)
+        {
+            terminal.WriteError("interrupted");
+            return ExitCode.Interrupted;
+        }
+        catch (CommandAppException error)
+        {
+            terminal.WriteError($"{error.Message.TrimEnd('.')}; see gaussgen --help");
+            return ExitCode.NotRead;
+        }
+        catch (UnwritableException error)
+        {
+            terminal.WriteError(error.Message);
+            return ExitCode.NotRead;
+        }
+    }
+}

@@ -1,0 +1,50 @@
+using System;
+using System.Collections.Frozen;
+using System.Collections.Generic;
+using GaussGen.Mathematics.Proofs;
+using GaussGen.Tool.Reading;
+
+namespace GaussGen.Tool.Claims;
+
+/// <summary>A family of tables as the verifier knows it.</summary>
+/// <param name="Attribute">The attribute's name without its suffix.</param>
+/// <param name="Spans">The spans that hold the family's entries.</param>
+/// <param name="ReadClaim">Makes the claim of a declaration's arguments.</param>
+internal sealed record ClaimFamily(string Attribute, IReadOnlyList<string> Spans, Func<ClaimArguments, TableClaim> ReadClaim);
+
+/// <summary>Every family there is. A new one is its claim in the mathematics and one line here.</summary>
+internal static class ClaimTable
+{
+    private static readonly string[] Rule = ["Nodes", "Weights"];
+    private static readonly string[] Moments = ["Raw", "Central", "Absolute"];
+
+    private static readonly FrozenDictionary<string, ClaimFamily> Families = new ClaimFamily[]
+    {
+        new("GaussHermite", Rule, read => new GaussHermiteClaim(read.Next<int>(), Weight(read), read.Format(), read.Named("DropZeroWeights", false))),
+        new("NormalMoments", Moments, read => new NormalMomentsClaim(read.Next<double>(), read.Next<double>(), read.Named("MaximumOrder", 4), read.Format())),
+    }.ToFrozenDictionary(family => family.Attribute, StringComparer.Ordinal);
+
+    /// <summary>The family that a declaration belongs to, or null if this version of the tool does not know it.</summary>
+    public static ClaimFamily? Find(string attribute) => Families.GetValueOrDefault(attribute);
+
+    /// <summary>What a declaration promises.</summary>
+    /// <exception cref="ClaimException">The arguments are not such as the family has.</exception>
+    public static TableClaim Read(ClaimFamily family, Declaration declaration)
+    {
+        ClaimArguments arguments = new(declaration);
+        try
+        {
+            TableClaim claim = family.ReadClaim(arguments);
+            arguments.RequireAllRead();
+            return claim;
+        }
+        catch (ArgumentException error)
+        {
+            string message = error.Message.Split('\n')[0];
+            throw new ClaimException($"[{declaration.Name}] asks for what cannot be: {message}");
+        }
+    }
+
+    private static HermiteWeight Weight(ClaimArguments read) =>
+        read.IsSecond("Convention") ? HermiteWeight.ExponentialOfMinusSquare : HermiteWeight.StandardNormalDensity;
+}

@@ -1,0 +1,22 @@
+using System.Linq;
+
+namespace GaussGen.Tool.Output;
+
+/// <summary>Text from outside (names in a file's metadata, paths, messages of the system) made fit for one line of a terminal.</summary>
+internal static class PlainText
+{
+    private const int Longest = 1024;
+
+    /// <summary>
+    /// The text without control characters, which could move the cursor, change colours or break the line, and cut if no honest
+    /// name is that long.
+    /// </summary>
+    public static string OneLine(string text)
+    {
+        string cut = text.Length <= Longest ? text : text[..Longest] + "…";
+        return cut.Any(IsUnfit) ? new string([.. cut.Select(letter => IsUnfit(letter) ? '\uFFFD' : letter)]) : cut;
+    }
+
+    private static bool IsUnfit(char letter) =>
+        char.IsControl(letter) || letter is '\u2028' or '\u2029' or (>= '\u202A' and <= '\u202E') or (>= '\u2066' and <= '\u2069');
+}

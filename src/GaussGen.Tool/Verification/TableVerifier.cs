@@ -1,0 +1,110 @@
+using System;
+using System.Collections.Concurrent;
+using System.Collections.Generic;
+using System.Globalization;
+using System.Linq;
+using System.Threading;
+using GaussGen.Mathematics.Formats;
+using GaussGen.Mathematics.Proofs;
+using GaussGen.Tool.Claims;
+using GaussGen.Tool.Output;
+using GaussGen.Tool.Reading;
+
+namespace GaussGen.Tool.Verification;
+
+/// <summary>A table that is to be verified: a declaration, or why there is none to go by.</summary>
+/// <param name="Type">The type that carries it.</param>
+/// <param name="Attribute">The attribute's name.</param>
+/// <param name="Declaration">The declaration; null if its arguments could not be read.</param>
+internal sealed record DeclaredTable(FoundType Type, string Attribute, Declaration? Declaration)
+{
+    /// <summary>The tables of a type.</summary>
+    public static IEnumerable<DeclaredTable> Of(FoundType type) => type.Declarations
+        .Select(declaration => new DeclaredTable(type, declaration.Name, declaration))
+        .Concat(type.UnreadDeclarations.Keys.Select(name => new DeclaredTable(type, name, null)));
+
+    /// <summary>The number of entries in all spans of the type, which is what the work grows with.</summary>
+    public int Size => Type.Spans.Values.Sum(span => span.Count);
+}
+
+/// <summary>Proves tables one at a time; the same claim on the same data, as copies of an assembly have it, is proven once.</summary>
+internal sealed class TableVerifier
+{
+    private readonly ConcurrentDictionary<(TableClaim Claim, string Digest), Lazy<TableProof>> _proofs = new();
+
+    /// <summary>Proves a table, or says why not.</summary>
+    /// <exception cref="OperationCanceledException">The token was cancelled.</exception>
+    public TableResult Verify(DeclaredTable table, IProgress<double>? progress, CancellationToken cancellation)
+    {
+        if (table.Declaration is null)
+        {
+            return Unprovable(table, table.Type.UnreadDeclarations[table.Attribute]);
+        }
+
+        if (ClaimTable.Find(table.Attribute) is not { } family)
+        {
+            return Unprovable(table, $"[{table.Attribute}] is unknown to this version of the tool; install a newer one");
+        }
+
+        TableClaim? claim = null;
+        try
+        {
+            claim = ClaimTable.Read(family, table.Declaration);
+            string? unread = family.Spans.FirstOrDefault(table.Type.UnreadSpans.ContainsKey);
+            return unread is not null
+                ? Unprovable(table, $"{unread} cannot be read: {table.Type.UnreadSpans[unread]}", claim)
+                : Judge(table, Prove(claim, FoundData.Of(table.Type, family), progress, cancellation));
+        }
+        catch (ClaimException error)
+        {
+            return Unprovable(table, error.Message);
+        }
+        catch (Exception error) when (error is InvalidOperationException or ArithmeticException)
+        {
+            return Unprovable(table, "the proof stopped: " + PlainText.OneLine(error.Message), claim);
+        }
+    }
+
+    private TableProof Prove(TableClaim claim, TableData data, IProgress<double>? progress, CancellationToken cancellation)
+    {
+        Lazy<TableProof> proof = _proofs.GetOrAdd(
+            (claim, DataDigest.Of(data)), _ => new Lazy<TableProof>(() => claim.Prove(data, progress, cancellation)));
+        return proof.Value;
+    }
+
+    private static TableResult Unprovable(DeclaredTable table, string reason, TableClaim? claim = null) =>
+        new(table.Type, table.Attribute, claim, null, table.Size, [new Finding(FindingKind.NotProven, null, reason)]);
+
+    private static TableResult Judge(DeclaredTable table, TableProof proof)
+    {
+        List<Finding> findings = [];
+        findings.AddRange(proof.Faults.Select(fault => new Finding(FindingKind.WrongShape, null, fault.TrimEnd('.'))));
+        findings.AddRange(proof.Entries.Where(entry => entry.Verdict != Verdict.Proven).Select(entry => Describe(entry, proof.Claim.Format)));
+        if (findings.Count == 0 && proof.Verdict != Verdict.Proven)
+        {
+            MomentEquation broken = proof.MomentEquations.First(equation => !equation.Holds);
+            findings.Add(new Finding(
+                FindingKind.NotProven, null, $"every entry is proven, and yet the moment equation of degree {broken.Degree} does not hold; report this contradiction"));
+        }
+
+        return new TableResult(table.Type, table.Attribute, proof.Claim, proof, proof.Entries.Count, findings);
+    }
+
+    private static Finding Describe(EntryProof entry, BinaryFormat format)
+    {
+        string found = Text(entry.Found, entry, format);
+        string? expected = entry.Expected is { } bits ? Text(bits, entry, format) : null;
+        if (entry.Verdict == Verdict.Unproven)
+        {
+            string why = entry.Reason is null ? "" : ": " + entry.Reason.TrimEnd('.');
+            return new Finding(FindingKind.NotProven, entry.Name, $"{entry.Name} is not proven, found {found}{why}", expected, found);
+        }
+
+        string distance = entry.IsInteger ? "" : $", {UlpText.Of(entry.DistanceInUlp)} ulp from the true value";
+        string reason = entry.Reason is null ? "" : "; " + entry.Reason.TrimEnd('.');
+        return new Finding(FindingKind.WrongEntry, entry.Name, $"{entry.Name}: expected {expected}, found {found}{distance}{reason}", expected, found);
+    }
+
+    private static string Text(ulong bits, EntryProof entry, BinaryFormat format) =>
+        entry.IsInteger ? ((int)bits).ToString(CultureInfo.InvariantCulture) : EncodingText.Of(bits, format);
+}

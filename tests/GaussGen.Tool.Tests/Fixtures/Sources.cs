@@ -1,0 +1,38 @@
+namespace GaussGen.Tool.Tests.Fixtures;
+
+/// <summary>Declarations for the real generator: every family, every format, and the shapes that differ.</summary>
+internal static class Sources
+{
+    public const string Small = """
+        using GaussGen;
+        namespace SurveyBoat
+        {
+            [GaussHermite(1)] public static partial class One { }
+            [GaussHermite(2)] public static partial class Two { }
+            [GaussHermite(5)] public static partial class Five { }
+            [GaussHermite(4, Convention = HermiteConvention.Physicist)] public static partial class Four { }
+            [GaussHermite(7, Convention = HermiteConvention.Physicist, Format = NumberFormat.Binary32)] public partial struct Seven { }
+            [GaussHermite(8)] public static partial class Eight { }
+            [GaussHermite(9)] public static partial class Nine { }
+            [GaussHermite(10, Convention = HermiteConvention.Physicist)] public static partial class Ten { }
+            [GaussHermite(11)] public static partial class Eleven { }
+            [GaussHermite(12, Convention = HermiteConvention.Physicist)] public static partial class Twelve { }
+            public partial class Outer
+            {
+                [GaussHermite(6, Format = NumberFormat.Binary32)] internal static partial class Six { }
+            }
+            [NormalMoments(1.5, 0.25)] public static partial class Wind { }
+            [NormalMoments(-0.5, 3, MaximumOrder = 6, Format = NumberFormat.Binary32)] public static partial class Drift { }
+            [NormalMoments(0, 1, MaximumOrder = 0)] public static partial class Nothing { }
+        }
+        """;
+
+    public const string Large = """
+        using GaussGen;
+        [GaussHermite(64)] public static partial class SixtyFour { }
+        [GaussHermite(63, Convention = HermiteConvention.Physicist)] public static partial class SixtyThree { }
+        [GaussHermite(50, Format = NumberFormat.Binary32)] public static partial class Fifty { }
+        [GaussHermite(100, Format = NumberFormat.Binary32, DropZeroWeights = true)] public static partial class Dropped { }
+        [NormalMoments(0.1, 1.7, MaximumOrder = 60)] public static partial class Wind { }
+        """;
+}

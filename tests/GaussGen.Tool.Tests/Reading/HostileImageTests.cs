@@ -1,0 +1,207 @@
+using System;
+using System.IO;
+
+using System.Reflection.PortableExecutable;
+using System.Threading;
+using System.Threading.Tasks;
+using GaussGen.Tool.Reading;
+using GaussGen.Tool.Tests.Fixtures;
+using Microsoft.CodeAnalysis;
+using Xunit;
+
+namespace GaussGen.Tool.Tests.Reading;
+
+/// <summary>Whatever a file holds, reading it ends with a result or with the one error, in bounded time and memory.</summary>
+public class HostileImageTests
+{
+    private const int Cases = 50_000;
+
+    private const string Source = """
+        using System;
+        using GaussGen;
+        namespace Survey
+        {
+            [GaussHermite(3)] static class A
+            {
+                public const int PointCount = 3;
+                public static ReadOnlySpan<double> Nodes => new double[] { -1.7320508075688772, 0.0, 1.7320508075688772 };
+                private static readonly double[] Table = { 0.16666666666666666, 0.6666666666666666, 0.16666666666666666 };
+                public static ReadOnlySpan<double> Weights => Table;
+                [NormalMoments(1.5, 0.25, MaximumOrder = 2, Format = NumberFormat.Binary32)]
+                public static class B
+                {
+                    public const float Raw1 = 1.5f;
+                    static readonly float[] Few = { 1f, 1.5f };
+                    public static ReadOnlySpan<float> Raw => Few;
+                    public static ReadOnlySpan<byte> Bytes => new byte[] { 1, 2, 3 };
+                }
+            }
+        }
+        """;
+
+    private static readonly byte[] Untouched = FixtureCompiler.Compile(Source);
+
+    [Fact]
+    public void Fifty_thousand_damaged_files()
+    {
+        int read = 0;
+        int refused = 0;
+        Parallel.For(0, Cases, index =>
+        {
+            byte[] image = Damaged(new Random(index));
+            try
+            {
+                _ = Read(image);
+                _ = Interlocked.Increment(ref read);
+            }
+            catch (UnreadableException error)
+            {
+                Assert.DoesNotContain('\n', error.Message);
+                _ = Interlocked.Increment(ref refused);
+            }
+        });
+
+        Assert.Equal(Cases, read + refused);
+        Assert.InRange(read, 1000, Cases - 1000);
+    }
+
+    [Fact]
+    public void Every_truncation_of_a_file()
+    {
+        Parallel.For(0, Untouched.Length, length =>
+        {
+            try
+            {
+                _ = Read(Untouched[..length]);
+            }
+            catch (UnreadableException)
+            {
+            }
+        });
+    }
+
+    [Fact]
+    public void Every_byte_of_the_metadata_set_to_extremes()
+    {
+        using PEReader executable = new(new MemoryStream(Untouched));
+        PEHeaders headers = executable.PEHeaders;
+        Parallel.For(headers.MetadataStartOffset, headers.MetadataStartOffset + headers.MetadataSize, place =>
+        {
+            foreach (byte value in new byte[] { 0, 1, 0x7F, 0x80, 0xFF })
+            {
+                byte[] image = [.. Untouched];
+                image[place] = value;
+                try
+                {
+                    _ = Read(image);
+                }
+                catch (UnreadableException)
+                {
+                }
+            }
+        });
+    }
+
+    [Theory]
+    [InlineData(0)]
+    [InlineData(1)]
+    [InlineData(64)]
+    [InlineData(100_000)]
+    public void Bytes_that_are_no_image(int length)
+    {
+        byte[] bytes = new byte[length];
+        new Random(length).NextBytes(bytes);
+        UnreadableException error = Assert.Throws<UnreadableException>(() => AssemblyImage.FromBytes(bytes));
+        Assert.Equal(UnreadableReason.NotAnImage, error.Reason);
+    }
+
+    [Fact]
+    public void A_native_image_is_named_as_such()
+    {
+        UnreadableException error = Assert.Throws<UnreadableException>(() => AssemblyImage.FromBytes(Images.Native()));
+        Assert.Equal(UnreadableReason.NativeImage, error.Reason);
+        Assert.True(error.IsUsualInFolders);
+    }
+
+    [Fact]
+    public void A_reference_assembly_is_named_as_such()
+    {
+        UnreadableException error = Assert.Throws<UnreadableException>(() => Read(Images.Reference(Source)));
+        Assert.Equal(UnreadableReason.ReferenceAssembly, error.Reason);
+        Assert.True(error.IsUsualInFolders);
+    }
+
+    [Fact]
+    public void A_module_without_manifest_is_refused()
+    {
+        Compilation compilation = FixtureCompiler.CreateCompilation(Framework.Net8, OptimizationLevel.Release, "Boat", ["class T { }"], []);
+        byte[] image = FixtureCompiler.Emit(compilation.WithOptions(compilation.Options.WithOutputKind(OutputKind.NetModule)));
+        Assert.Contains("manifest", Assert.Throws<UnreadableException>(() => Read(image)).Message, StringComparison.Ordinal);
+    }
+
+    [Fact]
+    public void Nothing_of_the_assembly_runs()
+    {
+        string mark = Path.Combine(Path.GetTempPath(), "gaussgen-" + Guid.NewGuid().ToString("N"));
+        byte[] image = FixtureCompiler.Compile(
+            $$"""
+            using System; using System.IO; using System.Runtime.CompilerServices; using GaussGen;
+            static class Start { [ModuleInitializer] internal static void Run() => File.WriteAllText(@"{{mark}}", "ran"); }
+            [GaussHermite(1)] static class T
+            {
+                static T() => Start.Run();
+                static readonly double[] Table = { 0.0 };
+                public static ReadOnlySpan<double> Nodes => Table;
+                public static ReadOnlySpan<double> Weights { get { Start.Run(); return Table; } }
+            }
+            """);
+
+        FoundType type = Assert.Single(Read(image).Types);
+        Assert.Equal(["Nodes"], type.Spans.Keys);
+        Assert.Equal(["Weights"], type.UnreadSpans.Keys);
+        Assert.False(File.Exists(mark));
+
+        // The same code does write the file once it is allowed to run.
+        System.Reflection.Assembly loaded = System.Reflection.Assembly.Load(image);
+        RuntimeHelpersRun(loaded);
+        Assert.True(File.Exists(mark));
+        File.Delete(mark);
+    }
+
+    private static void RuntimeHelpersRun(System.Reflection.Assembly loaded) =>
+        System.Runtime.CompilerServices.RuntimeHelpers.RunModuleConstructor(loaded.ManifestModule.ModuleHandle);
+
+    private static FoundAssembly Read(byte[] bytes)
+    {
+        using AssemblyImage image = AssemblyImage.FromBytes(bytes);
+        return AssemblyReader.Read(image, CancellationToken.None);
+    }
+
+    /// <summary>Damage of one of four kinds, the interesting places first: headers, tables, heaps and code.</summary>
+    private static byte[] Damaged(Random random)
+    {
+        byte[] image = [.. Untouched];
+        switch (random.Next(4))
+        {
+            case 0:
+                for (int flips = 1 << random.Next(6); flips > 0; flips--)
+                {
+                    image[random.Next(image.Length)] ^= (byte)(1 << random.Next(8));
+                }
+
+                return image;
+            case 1:
+                image = image[..random.Next(image.Length)];
+                return image;
+            case 2:
+                int start = random.Next(image.Length);
+                random.NextBytes(image.AsSpan(start, Math.Min(1 << random.Next(10), image.Length - start)));
+                return image;
+            default:
+                int from = random.Next(image.Length - 8);
+                int[] extremes = [0, 1, -1, int.MaxValue, int.MinValue, 0x00FFFFFF, random.Next()];
+                BitConverter.TryWriteBytes(image.AsSpan(from), extremes[random.Next(extremes.Length)]);
+                return image;
+        }
+    }
+}
