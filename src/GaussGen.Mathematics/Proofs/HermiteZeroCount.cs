@@ -17,7 +17,7 @@ namespace GaussGen.Mathematics.Proofs;
 /// <para>
 /// The polynomials in t have positive leading coefficients and positive products c²k(k−1) in their recurrence, so they are a
 /// Sturm sequence: the number of sign changes of R₀(t), …, Rₘ(t), zeros left out, is the number of zeros of Rₘ above t
-/// (Sturm 1829; for orthogonal polynomials Szegő, Orthogonal Polynomials, 3.3; DLMF 18.2(viii)). Each zero of Rₘ above t
+/// (Sturm 1829; for orthogonal polynomials Szegő, Orthogonal Polynomials, 3.3; DLMF 18.2(vi)). Each zero of Rₘ above t
 /// is the square of one zero of Pₙ above √t. So one evaluation proves, for that point alone, how many nodes lie beyond it.
 /// </para>
 /// </remarks>

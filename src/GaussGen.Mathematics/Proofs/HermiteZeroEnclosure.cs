@@ -11,7 +11,7 @@ namespace GaussGen.Mathematics.Proofs;
 /// <remarks>
 /// <para>
 /// Notation: P and c as in <see cref="HermiteZeroCount"/>, hₖ = cᵏ k!, κ(u) = Σ Pₖ(u)²/hₖ over k &lt; n, ξ a zero of Pₙ
-/// with |ξ − u| ≤ δ, and X = |u| + δ. The weight of ξ is the Christoffel number 1/κ(ξ) (Szegő 3.4.8; DLMF 3.5(v)), in units
+/// with |ξ − u| ≤ δ, and X = |u| + δ. The weight of ξ is the Christoffel number 1/κ(ξ) (Szegő 3.4; DLMF 3.5(v)), in units
 /// of the integral of the weight function.
 /// </para>
 /// <para>
