@@ -39,6 +39,8 @@ public sealed class ConsumerTests(PackedLibrary package, ITestOutputHelper log)
         Print("drift.central4", Bits(Drift.Central[4]));
         Print("drift.absolute1", Bits(Drift.Absolute1));
         Print("drift.orders", Drift.Raw.Length.ToString());
+        Type[] tables = { typeof(RangeNoise), typeof(WaveSlap), typeof(Drift) };
+        Print("typeInitializers", Array.FindAll(tables, table => table.TypeInitializer is not null).Length.ToString());
 
         static string Bits(double value) => BitConverter.DoubleToInt64Bits(value).ToString("x16");
         static void Print(string name, string value) => Console.WriteLine($"{name} = {value}");
@@ -191,6 +193,9 @@ public sealed class ConsumerTests(PackedLibrary package, ITestOutputHelper log)
         // E X² = μ² + σ², which the rule integrates exactly: what is left is the rounding of a few operations.
         AssertWithinFourUlps(1.5 * 1.5 + 0.25 * 0.25, Value(values["meanSquare.struct"]));
         Assert.Equal(values["meanSquare.struct"], values["meanSquare.delegate"]);
+
+        // Nothing runs before the first call.
+        Assert.Equal("0", values["typeInitializers"]);
 
         // E X³ = μ³ + 3μσ² and E (X − μ)⁴ = 3σ⁴ are binary fractions here; E |X − μ| = σ√(2/π), by its 20 digits.
         Assert.Equal("5", values["drift.orders"]);

@@ -25,4 +25,19 @@ internal sealed record IntegrandForm(string Type, string TypeParameters, string 
     /// <summary>The signature of a method whose last parameter is the function.</summary>
     public string SignatureAfter(IEnumerable<string> parameterTypes) =>
         MethodSignature.Of(IsGeneric ? 1 : 0, parameterTypes.Append(IsGeneric ? "!0" : Type));
+
+    /// <summary>Writes the lines before the body of a method whose last parameter is the function.</summary>
+    /// <param name="writer">Where to.</param>
+    /// <param name="name">The method's name.</param>
+    /// <param name="parameters">The parameters before, each with a comma after it.</param>
+    /// <param name="type">What it returns.</param>
+    public void WriteHeader(SourceWriter writer, string name, string parameters, NumberType type)
+    {
+        writer.Line(TableText.GeneratedCodeAttribute);
+        writer.Line($"public static {type.Keyword} {name}{TypeParameters}({parameters}{Type} integrand)");
+        if (IsGeneric)
+        {
+            writer.Line("    " + Constraint);
+        }
+    }
 }

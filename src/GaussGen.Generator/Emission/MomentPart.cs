@@ -31,8 +31,8 @@ internal static class MomentPart
     private static List<string> Remarks(RoundedMoments moments, MomentList[] lists, NumberType type, TargetCapabilities target) => new()
     {
         Documentation.Escape(
-            $"Every moment is the {type.Format.Name} value nearest to the true one (proven: {moments.Table.Description.Method}; "
-            + $"{Widths(lists.SelectMany(list => list.Values))}). The moment of order k is in the variable's unit to the power k."),
+            $"Every moment is the {type.Format.Name} value nearest to the true one ({Text(type.Format.Precision)} bits; proven: {moments.Table.Description.Method}; "
+            + $"{Widths(lists.SelectMany(list => list.Values))}). The moment of order k is in the variable's unit to the power k; parameters mean their exact binary64 values."),
         $"{Text(lists.Sum(list => list.Values.Count) * type.Bytes)} bytes of data"
             + (target.KeepsSpansInImage ? " in the image; nothing runs before the first call." : " in three arrays, filled before they are first read."),
         "Caution: that the constants are right says nothing about how well the distribution describes what was measured.",

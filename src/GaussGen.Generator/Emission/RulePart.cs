@@ -25,7 +25,7 @@ internal static class RulePart
         {
             Documentation.Escape(
                 $"Exact for polynomials up to degree {Text(rule.Table.DegreeOfExactness)}. Every node and weight is the {type.Format.Name} value "
-                + $"nearest to the true one (proven: {description.Method}; {Widths(rule.Nodes.Concat(rule.Weights))})."),
+                + $"nearest to the true one ({Text(type.Format.Precision)} bits; proven: {description.Method}; {Widths(rule.Nodes.Concat(rule.Weights))})."),
         };
         if (rule.FirstZeroWeightNode is { } first)
         {

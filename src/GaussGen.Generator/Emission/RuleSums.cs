@@ -35,7 +35,7 @@ internal static class RuleSums
             DocumentIntegrand(writer);
             writer.Returns($"The sum Σ wᵢ f(xᵢ) over the nodes; {Exactness(rule)}.");
             DocumentNull(writer, form);
-            WriteHeader(writer, name, string.Empty, form, type);
+            form.WriteHeader(writer, name, string.Empty, type);
             using (writer.Block())
             {
                 writer.Line($"return {Evaluation(rule)}(Nodes, Weights, {type.Zero}, {type.One}, integrand);");
@@ -54,7 +54,7 @@ internal static class RuleSums
             writer.Returns($"The expectation; {Exactness(rule)}. At standard deviation 0 it is the value of the function at the mean.");
             writer.Throws("global::System.ArgumentOutOfRangeException", "The standard deviation is negative, NaN or infinite.");
             DocumentNull(writer, form);
-            WriteHeader(writer, "Expectation", $"{type.Keyword} mean, {type.Keyword} standardDeviation, ", form, type);
+            form.WriteHeader(writer, "Expectation", $"{type.Keyword} mean, {type.Keyword} standardDeviation, ", type);
             using (writer.Block())
             {
                 writer.Line("global::GaussGen.Require.StandardDeviation(standardDeviation);");
@@ -79,16 +79,6 @@ internal static class RuleSums
         }
 
         writer.Line($"return {Evaluation(rule)}(Nodes, Weights, mean, {scale}, {factor}integrand);");
-    }
-
-    private static void WriteHeader(SourceWriter writer, string name, string parameters, IntegrandForm form, NumberType type)
-    {
-        writer.Line(GeneratedCodeAttribute);
-        writer.Line($"public static {type.Keyword} {name}{form.TypeParameters}({parameters}{form.Type} integrand)");
-        if (form.IsGeneric)
-        {
-            writer.Line("    " + form.Constraint);
-        }
     }
 
     private static void DocumentTypeParameter(SourceWriter writer, IntegrandForm form)

@@ -16,8 +16,8 @@ internal static class StandIn
 {
     private const int HighestOrder = 1000;
 
-    private const string Body =
-        "{ throw new global::System.NotSupportedException(\"The declaration of this table has a mistake that the compiler reports.\"); }";
+    private const string Throw =
+        "throw new global::System.NotSupportedException(\"The declaration of this table has a mistake that the compiler reports.\");";
 
     private static readonly string[] Location = { "mean", "standardDeviation" };
 
@@ -59,24 +59,30 @@ internal static class StandIn
         }
     }
 
-    private static GeneratedMember Constant(string name, string type, string value) =>
-        Member(name, null, $"public const {type} {name} = {value};");
-
-    private static GeneratedMember Span(string name, NumberType type) =>
-        Member(name, null, $"public static {type.Span} {name} {{ get {Body} }}");
-
-    private static GeneratedMember Sum(string name, NumberType type, string[] location, IntegrandForm form)
-    {
-        string parameters = string.Join(", ", location.Select(parameter => $"{type.Keyword} {parameter}").Append(form.Type + " integrand"));
-        return Member(
-            name,
-            form.SignatureAfter(location.Select(_ => type.Keyword)),
-            $"public static {type.Keyword} {name}{form.TypeParameters}({parameters}) {form.Constraint} {Body}");
-    }
-
-    private static GeneratedMember Member(string name, string? signature, string text) => new(name, signature, writer =>
+    private static GeneratedMember Constant(string name, string type, string value) => new(name, null, writer =>
     {
         writer.Line(GeneratedCodeAttribute);
-        writer.Line(text);
+        writer.Line($"public const {type} {name} = {value};");
     });
+
+    private static GeneratedMember Span(string name, NumberType type) => new(name, null, writer =>
+    {
+        writer.Line(GeneratedCodeAttribute);
+        writer.Line($"public static {type.Span} {name}");
+        using (writer.Block())
+        {
+            writer.Line("get { " + Throw + " }");
+        }
+    });
+
+    private static GeneratedMember Sum(string name, NumberType type, string[] location, IntegrandForm form) =>
+        new(name, form.SignatureAfter(location.Select(_ => type.Keyword)), writer =>
+        {
+            string parameters = string.Concat(location.Select(parameter => $"{type.Keyword} {parameter}, "));
+            form.WriteHeader(writer, name, parameters, type);
+            using (writer.Block())
+            {
+                writer.Line(Throw);
+            }
+        });
 }

@@ -22,7 +22,9 @@ public sealed record Consumer(params string[] Sources)
 
     public NullableContextOptions Nullable { get; init; } = NullableContextOptions.Enable;
 
-    public string AssemblyName { get; init; } = "Boat";
+    public bool AllowUnsafe { get; init; }
+
+    public string AssemblyName { get; init; } = Framework.DefaultAssemblyName;
 
     public ImmutableArray<MetadataReference> OtherReferences { get; init; } = [];
 
@@ -31,15 +33,18 @@ public sealed record Consumer(params string[] Sources)
 
     public CSharpParseOptions ParseOptions => new(LanguageVersion, Documentation);
 
-    public CSharpCompilation Compile() => CSharpCompilation.Create(
-        AssemblyName,
-        Sources.Select((text, index) => Parse(text, $"Source{index}.cs")),
-        Framework.References.Concat(OtherReferences),
-        new CSharpCompilationOptions(
+    public CSharpCompilation Compile() => Framework.Empty
+        .WithAssemblyName(AssemblyName)
+        .AddReferences(OtherReferences)
+        .WithOptions(new CSharpCompilationOptions(
             OutputKind.DynamicallyLinkedLibrary,
             generalDiagnosticOption: ReportDiagnostic.Error,
             warningLevel: 9999,
-            nullableContextOptions: LanguageVersion >= LanguageVersion.CSharp8 ? Nullable : NullableContextOptions.Disable));
+            allowUnsafe: AllowUnsafe,
+            nullableContextOptions: LanguageVersion.MapSpecifiedToEffectiveVersion() >= LanguageVersion.CSharp8
+                ? Nullable
+                : NullableContextOptions.Disable))
+        .AddSyntaxTrees(Sources.Select((text, index) => Parse(text, $"Source{index}.cs")));
 
     public SyntaxTree Parse(string text, string path) =>
         CSharpSyntaxTree.ParseText(SourceText.From(text, System.Text.Encoding.UTF8), ParseOptions, path);

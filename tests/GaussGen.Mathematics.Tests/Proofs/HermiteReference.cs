@@ -8,19 +8,19 @@ using GaussGen.Mathematics.Proofs;
 namespace GaussGen.Mathematics.Tests.Proofs;
 
 /// <summary>
-/// Nodes from the centre outward, and their weights, to 60 digits: hermite_reference.txt, made by mpmath with bisection of the explicit
+/// Nodes from the centre outward, and their weights, to 60 digits: hermite-reference.csv, made by mpmath with bisection of the explicit
 /// polynomial, which has nothing in common with a construction or a proof here.
 /// </summary>
 internal sealed record HermiteReference(int Points, HermiteWeight Weight, Rational Node, Rational WeightValue)
 {
-    /// <summary>The rules, each with its entries at and above the centre. An incomplete rule is left out.</summary>
+    /// <summary>The rules, each with its entries at and above the centre.</summary>
     public static IEnumerable<IGrouping<(int Points, HermiteWeight Weight), HermiteReference>> All =>
-        ReferenceData.Words("hermite_reference.txt")
-            .Select(words => new HermiteReference(
-                int.Parse(words[0], CultureInfo.InvariantCulture),
-                words[1] == "physicist" ? HermiteWeight.ExponentialOfMinusSquare : HermiteWeight.StandardNormalDensity,
-                Parse(words[2]),
-                Parse(words[3])))
+        ReferenceData.Read("hermite-reference.csv")
+            .Select(fields => new HermiteReference(
+                int.Parse(fields[0], CultureInfo.InvariantCulture),
+                fields[1] == "Physicist" ? HermiteWeight.ExponentialOfMinusSquare : HermiteWeight.StandardNormalDensity,
+                Parse(fields[2]),
+                Parse(fields[3])))
             .GroupBy(entry => (entry.Points, entry.Weight));
 
     private static Rational Parse(string text)
