@@ -1,3 +1,10 @@
 using BenchmarkDotNet.Running;
+using GaussGen.Benchmarks;
 
-BenchmarkSwitcher.FromAssembly(typeof(Program).Assembly).Run(args);
+if (args is ["construction"])
+{
+    ConstructionComparison.Run();
+    return;
+}
+
+BenchmarkSwitcher.FromAssembly(typeof(ConstructionBenchmarks).Assembly).Run(args);

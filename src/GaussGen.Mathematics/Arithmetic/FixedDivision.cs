@@ -1,3 +1,5 @@
+using System.Runtime.CompilerServices;
+
 namespace GaussGen.Mathematics.Arithmetic;
 
 /// <summary>Division of 128-bit integers.</summary>
@@ -14,16 +16,17 @@ internal static class FixedDivision
     {
         double reciprocal = 1.0 / divisorHigh;
         var remainder = new Remainder(high, low);
-        // Signed digits, each the nearest integer to remainder · 2^bits / divisor as far as double tells. The first is taken
-        // without a shift so that the remainder is within about half a divisor before the 128 or 127 bits begin.
-        long digit0 = remainder.TakeDigit(0, reciprocal, divisorHigh, divisorLow);
+        // What stands before the point is 0 or 1. The digits behind it are remainder · 2^bits / divisor rounded towards zero, as far
+        // as double tells, and bear the sign of the remainder.
+        long whole = 128 - shift;
+        remainder.AddMultiple(-whole, divisorHigh, divisorLow);
         long digit1 = remainder.TakeDigit(43, reciprocal, divisorHigh, divisorLow);
         long digit2 = remainder.TakeDigit(43, reciprocal, divisorHigh, divisorLow);
         int last = shift - 86;
         long digit3 = remainder.TakeDigit(last, reciprocal, divisorHigh, divisorLow);
 
-        // ((digit0·2^43 + digit1)·2^43 + digit2)·2^last + digit3, modulo 2^128; the true value fits.
-        long upper = (digit0 << 43) + digit1;
+        // ((whole·2^43 + digit1)·2^43 + digit2)·2^last + digit3, modulo 2^128; the true value fits.
+        long upper = (whole << 43) + digit1;
         ulong sumHigh = (ulong)(upper >> 21);
         ulong sumLow = (ulong)upper << 43;
         Add(ref sumHigh, ref sumLow, digit2);
@@ -68,42 +71,35 @@ internal static class FixedDivision
         internal readonly bool IsAtLeast(ulong high, ulong low) =>
             _high > 0 || (_high == 0 && (_middle > high || (_middle == high && _low >= low)));
 
-        /// <summary>Shifts left by less than 64, and takes off a multiple of the divisor so that about half of it is left.</summary>
+        /// <summary>Shifts left by less than 64, and takes off a multiple of the divisor so that about one divisor is left at most.</summary>
+        [MethodImpl(MethodImplOptions.AggressiveInlining)]
         internal long TakeDigit(int shift, double reciprocal, ulong divisorHigh, ulong divisorLow)
         {
-            if (shift != 0)
-            {
-                _high = (_high << shift) | (long)(_middle >> (64 - shift));
-                _middle = (_middle << shift) | (_low >> (64 - shift));
-                _low <<= shift;
-            }
-
-            double quotient = ((_high * TwoTo64) + _middle) * reciprocal;
-            var digit = (long)(quotient < 0 ? quotient - 0.5 : quotient + 0.5);
+            _high = (_high << shift) | (long)(_middle >> (64 - shift));
+            _middle = (_middle << shift) | (_low >> (64 - shift));
+            _low <<= shift;
+            // The lowest bits of the middle word are far below what a double holds of the sum.
+            double quotient = ((_high * TwoTo64) + ((long)(_middle >> 1) * 2.0)) * reciprocal;
+            var digit = (long)quotient;
             AddMultiple(-digit, divisorHigh, divisorLow);
             return digit;
         }
 
+        /// <summary>Adds a multiple of the divisor, modulo 2^192.</summary>
+        [MethodImpl(MethodImplOptions.AggressiveInlining)]
         internal void AddMultiple(long factor, ulong high, ulong low)
         {
-            var magnitude = (ulong)(factor < 0 ? -factor : factor);
-            ulong carry = WideProduct.Multiply(low, magnitude, out ulong word0);
-            ulong word2 = WideProduct.Multiply(high, magnitude, out ulong word1);
+            // factor + 2^64·[factor < 0] as unsigned; the multiple of 2^64 is taken off again, one word up.
+            ulong carry = WideProduct.Multiply(low, (ulong)factor, out ulong word0);
+            ulong word2 = WideProduct.Multiply(high, (ulong)factor, out ulong word1);
             word2 += WideProduct.Add(ref word1, carry);
-            if (factor < 0)
-            {
-                ulong borrow = _low < word0 ? 1UL : 0UL;
-                _low -= word0;
-                ulong next = _middle < word1 || (_middle == word1 && borrow != 0) ? 1UL : 0UL;
-                _middle -= word1 + borrow;
-                _high -= (long)(word2 + next);
-            }
-            else
-            {
-                carry = WideProduct.Add(ref _low, word0);
-                carry = WideProduct.Add(ref _middle, carry) + WideProduct.Add(ref _middle, word1);
-                _high += (long)(word2 + carry);
-            }
+            var sign = (ulong)(factor >> 63);
+            ulong borrow = word1 < (low & sign) ? 1UL : 0UL;
+            word1 -= low & sign;
+            word2 -= (high & sign) + borrow;
+            carry = WideProduct.Add(ref _low, word0);
+            carry = WideProduct.Add(ref _middle, carry) + WideProduct.Add(ref _middle, word1);
+            _high += (long)(word2 + carry);
         }
     }
 }

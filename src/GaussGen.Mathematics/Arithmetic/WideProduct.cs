@@ -1,3 +1,4 @@
+using System;
 using System.Runtime.CompilerServices;
 
 namespace GaussGen.Mathematics.Arithmetic;
@@ -51,21 +52,15 @@ internal static class WideProduct
     /// <summary>The number of zero bits above the leading bit; 64 for zero.</summary>
     internal static int LeadingZeros(ulong value)
     {
-        if (value == 0)
+        var upper = (uint)(value >> 32);
+        uint word = upper != 0 ? upper : (uint)value;
+        if (word == 0)
         {
             return 64;
         }
 
-        int zeros = 0;
-        for (int step = 32; step > 0; step >>= 1)
-        {
-            if (value >> (64 - step) == 0)
-            {
-                zeros += step;
-                value <<= step;
-            }
-        }
-
-        return zeros;
+        // A double holds 32 bits exactly, so that its exponent is that of the leading bit.
+        int exponent = (int)(BitConverter.DoubleToInt64Bits(word) >> 52) - 1023;
+        return (upper != 0 ? 31 : 63) - exponent;
     }
 }

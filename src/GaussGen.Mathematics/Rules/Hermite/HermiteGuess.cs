@@ -139,7 +139,8 @@ internal static class HermiteGuess
 
             double change = h == 0 ? u : h * sum / slope;
             h -= change;
-            if (Math.Abs(change) <= 1e-15 * Math.Abs(h))
+            // The digits double with each step; half of them are enough for the next road.
+            if (Math.Abs(change) <= 1e-6 * Math.Abs(h))
             {
                 break;
             }

@@ -1,0 +1,43 @@
+using System;
+using System.Linq;
+using System.Threading;
+using BenchmarkDotNet.Attributes;
+using GaussGen.Mathematics.Formats;
+using GaussGen.Mathematics.Rules;
+using MathNet.Numerics.LinearAlgebra;
+using MathNet.Numerics.LinearAlgebra.Factorization;
+
+namespace GaussGen.Benchmarks;
+
+/// <summary>
+/// A Gauss–Hermite table from nothing: ours to the last correctly rounded and proven binary64 value, against the set-up that a
+/// program would do at start, the symmetric eigenvalue decomposition of the recurrence's matrix (Golub and Welsch 1969).
+/// </summary>
+[MemoryDiagnoser]
+public class ConstructionBenchmarks
+{
+    [Params(5, 20, 64, 200, 1000)]
+    public int Points { get; set; }
+
+    [Benchmark(Baseline = true, Description = "eigenvalues, unproven")]
+    public double Eigenvalues()
+    {
+        Matrix<double> jacobi = Matrix<double>.Build.Dense(Points, Points);
+        for (int k = 1; k < Points; k++)
+        {
+            jacobi[k - 1, k] = jacobi[k, k - 1] = Math.Sqrt(k);
+        }
+
+        Evd<double> decomposition = jacobi.Evd(Symmetricity.Symmetric);
+        double[] nodes = decomposition.EigenValues.Select(value => value.Real).ToArray();
+        double[] weights = decomposition.EigenVectors.Row(0).Select(component => component * component).ToArray();
+        return nodes[0] + weights[0];
+    }
+
+    [Benchmark(Description = "certified, correctly rounded")]
+    public RoundedRule Certified()
+    {
+        var request = new GaussHermiteRequest(Points, Mathematics.Rules.HermiteConvention.Probabilist, BinaryFormat.Binary64, DropZeroWeights: false);
+        return RuleRounding.Round(request.Construct(CancellationToken.None), request.Format, request.DropZeroWeights, CancellationToken.None);
+    }
+}
