@@ -83,14 +83,9 @@ internal static class Magnitude
 
     private static int ExactBitLength(BigInteger value)
     {
-        // Two's complement of a positive number: the top byte holds the sign bit, so it may be zero.
+        // Two's complement of a positive number: the top byte is zero where the one below it is full and holds no sign.
         byte[] bytes = BigInteger.Abs(value).ToByteArray();
         int top = bytes.Length - 1;
-        while (bytes[top] == 0)
-        {
-            top--;
-        }
-
         return (top * 8) + BitLength(bytes[top]);
     }
 }

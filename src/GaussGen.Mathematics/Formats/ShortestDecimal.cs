@@ -48,12 +48,7 @@ public static class ShortestDecimal
         ulong hidden = 1UL << (format.Precision - 1);
         bool isNarrow = significand == hidden && unit > format.MinimumExponent;
         int down = isNarrow ? 1 : 2;
-        int decade = FloorLog10(isNarrow ? 3 : 4, unit - 2);
-
-        // x quarters are x·step/divisor multiples of 10^decade.
-        int twos = unit - 2 - decade;
-        BigInteger step = BigInteger.Pow(5, Math.Max(-decade, 0)) << Math.Max(twos, 0);
-        BigInteger divisor = BigInteger.Pow(5, Math.Max(decade, 0)) << Math.Max(-twos, 0);
+        int decade = ScaleToDecade(isNarrow ? 3 : 4, unit - 2, out BigInteger step, out BigInteger divisor);
         var whole = (ulong)BigInteger.DivRem((significand << 2) * step, divisor, out BigInteger above);
 
         // An end reads back as the number where ties go to it.
@@ -95,25 +90,25 @@ public static class ShortestDecimal
         return isWholeInside && (isWholeCloser || !isNextInside) ? whole : whole + 1;
     }
 
-    /// <summary>The greatest k with 10^k ≤ factor · 2^power, factor 3 or 4.</summary>
-    private static int FloorLog10(int factor, int power)
+    /// <summary>
+    /// The greatest k with 10^k ≤ factor · 2^power, factor 3 or 4, and 2^power as step/divisor multiples of 10^k.
+    /// </summary>
+    private static int ScaleToDecade(int factor, int power, out BigInteger step, out BigInteger divisor)
     {
         // A guess from below, with ½ log₁₀ 2 = 161614249.6…/2³⁰, log₂ 3 > 3/2 and 2⁻¹⁰ to spare, is made right with integers.
-        int guess = (int)((((2L * power) + factor) * 161614249L - (1L << 20)) >> 30);
-        while (IsAtMost(guess + 1, factor, power))
+        int decade = (int)((((2L * power) + factor) * 161614249L - (1L << 20)) >> 30);
+        while (true)
         {
-            guess++;
+            int twos = power - decade;
+            step = BigInteger.Pow(5, Math.Max(-decade, 0)) << Math.Max(twos, 0);
+            divisor = BigInteger.Pow(5, Math.Max(decade, 0)) << Math.Max(-twos, 0);
+            if (factor * step < 10 * divisor)
+            {
+                return decade;
+            }
+
+            decade++;
         }
-
-        return guess;
-    }
-
-    /// <summary>Whether 10^k ≤ factor · 2^power.</summary>
-    private static bool IsAtMost(int k, int factor, int power)
-    {
-        BigInteger left = BigInteger.Pow(5, Math.Max(k, 0)) << Math.Max(k - power, 0);
-        BigInteger right = (factor * BigInteger.Pow(5, Math.Max(-k, 0))) << Math.Max(power - k, 0);
-        return left <= right;
     }
 
     private static string Layout(string digits, int exponent)
