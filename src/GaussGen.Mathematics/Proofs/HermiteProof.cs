@@ -85,7 +85,7 @@ internal sealed class HermiteProof
 
     /// <summary>
     /// What carries the rule to a normal distribution: Σ wᵢ f(m + s·NodeScale·xᵢ) · ReciprocalTotalWeight, by substitution of
-    /// m + s·NodeScale·x in the weight function.
+    /// m + s·NodeScale·x in the weight function; and the integral Σ wᵢ f(IntegralLocation + IntegralScale·xᵢ), which is the sum as it is.
     /// </summary>
     private void JudgeScaling(CancellationToken cancellation)
     {
@@ -96,6 +96,8 @@ internal sealed class HermiteProof
         Ball reciprocal = isDensity ? one : Ball.Divide(one, Constants.SqrtPi(Precision, cancellation), Precision);
         _report.Constant("NodeScale", Known(scale), isRequired: false);
         _report.Constant("ReciprocalTotalWeight", Known(reciprocal), isRequired: false);
+        _report.Constant("IntegralLocation", Known(Ball.FromInteger(0)), isRequired: false);
+        _report.Constant("IntegralScale", Known(one), isRequired: false);
     }
 
     private KnownNumber Known(Ball value) => new(value.Lower, value.Upper, NearestValue.Of(_claim.Format, value));

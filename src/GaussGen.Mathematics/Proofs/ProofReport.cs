@@ -61,27 +61,28 @@ internal sealed class ProofReport(TableClaim claim, TableData data)
         }
     }
 
-    /// <summary>Judges a constant of the claim's format.</summary>
+    /// <summary>Judges a constant of the claim's format, wherever there is one of that name.</summary>
     /// <param name="member">Its name.</param>
     /// <param name="known">The true value.</param>
     /// <param name="isRequired">Whether it is a fault if the constant is missing.</param>
     public void Constant(string member, KnownNumber known, bool isRequired)
     {
-        DataConstant? constant = data.Constants.FirstOrDefault(candidate => candidate.Name == member);
-        if (constant is null)
+        List<DataConstant> constants = [.. data.Constants.Where(candidate => candidate.Name == member)];
+        if (constants.Count == 0 && isRequired)
         {
-            if (isRequired)
+            _faults.Add(member + " is missing.");
+        }
+
+        foreach (DataConstant constant in constants)
+        {
+            if (constant.Format != claim.Format)
             {
-                _faults.Add(member + " is missing.");
+                _faults.Add(WrongType(member, constant.Format?.Name));
             }
-        }
-        else if (constant.Format != claim.Format)
-        {
-            _faults.Add(WrongType(member, constant.Format?.Name));
-        }
-        else
-        {
-            Judge(member, null, constant.Bits, known);
+            else
+            {
+                Judge(member, null, constant.Bits, known);
+            }
         }
     }
 

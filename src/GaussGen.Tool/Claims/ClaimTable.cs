@@ -9,8 +9,12 @@ namespace GaussGen.Tool.Claims;
 /// <summary>A family of tables as the verifier knows it.</summary>
 /// <param name="Attribute">The attribute's name without its suffix.</param>
 /// <param name="Spans">The spans that hold the family's entries.</param>
+/// <param name="IsLocated">
+/// Whether the family's expectation takes a mean and a standard deviation, so that its code holds the constants that carry the rule
+/// to them.
+/// </param>
 /// <param name="ReadClaim">Makes the claim of a declaration's arguments.</param>
-internal sealed record ClaimFamily(string Attribute, IReadOnlyList<string> Spans, Func<ClaimArguments, TableClaim> ReadClaim);
+internal sealed record ClaimFamily(string Attribute, IReadOnlyList<string> Spans, bool IsLocated, Func<ClaimArguments, TableClaim> ReadClaim);
 
 /// <summary>Every family there is. A new one is its claim in the mathematics and one line here.</summary>
 internal static class ClaimTable
@@ -20,8 +24,8 @@ internal static class ClaimTable
 
     private static readonly FrozenDictionary<string, ClaimFamily> Families = new ClaimFamily[]
     {
-        new("GaussHermite", Rule, read => new GaussHermiteClaim(read.Next<int>(), Weight(read), read.Format(), read.Named("DropZeroWeights", false))),
-        new("NormalMoments", Moments, read => new NormalMomentsClaim(read.Next<double>(), read.Next<double>(), read.Named("MaximumOrder", 4), read.Format())),
+        new("GaussHermite", Rule, true, read => new GaussHermiteClaim(read.Next<int>(), Weight(read), read.Format(), read.Named("DropZeroWeights", false))),
+        new("NormalMoments", Moments, false, read => new NormalMomentsClaim(read.Next<double>(), read.Next<double>(), read.Named("MaximumOrder", 4), read.Format())),
     }.ToFrozenDictionary(family => family.Attribute, StringComparer.Ordinal);
 
     /// <summary>The family that a declaration belongs to, or null if this version of the tool does not know it.</summary>

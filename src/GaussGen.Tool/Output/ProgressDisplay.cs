@@ -22,7 +22,7 @@ internal static class ProgressDisplay
         {
             await terminal.Messages.Progress()
                 .AutoClear(true)
-                .Columns(new TaskDescriptionColumn { Alignment = Justify.Left }, new ProgressBarColumn { Width = 24 }, new PercentageColumn(), new ElapsedTimeColumn())
+                .Columns(new TaskDescriptionColumn { Alignment = Justify.Left }, new ProgressBarColumn { Width = 24, CompletedStyle = Style.Plain, FinishedStyle = Style.Plain, RemainingStyle = new Style(Color.Grey) }, new PercentageColumn(), new ElapsedTimeColumn())
                 .StartAsync(context => FollowAsync(context, running, progress))
                 .ConfigureAwait(false);
         }

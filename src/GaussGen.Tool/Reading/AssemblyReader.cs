@@ -1,5 +1,6 @@
 using System;
 using System.Collections.Generic;
+using System.Linq;
 using System.Reflection;
 using System.Reflection.Metadata;
 using System.Threading;
@@ -15,6 +16,8 @@ internal sealed class AssemblyReader
     private readonly MetadataNames _names;
     private readonly AttributeReader _attributes;
     private readonly SpanForms _spans;
+    private readonly MethodLiterals _literals;
+    private readonly HashSet<EntityHandle> _generated = [];
 
     private AssemblyReader(AssemblyImage image)
     {
@@ -25,6 +28,7 @@ internal sealed class AssemblyReader
         MappedData data = new(image.Executable, _metadata);
         ArrayForms arrays = new(_names, data);
         StaticArrays statics = new(image.Executable, _metadata, _names, arrays, decoder);
+        _literals = new MethodLiterals(image.Executable, _metadata, decoder);
         _spans = new SpanForms(image.Executable, _metadata, _names, data, arrays, statics, decoder);
     }
 
@@ -62,7 +66,6 @@ internal sealed class AssemblyReader
     private Dictionary<EntityHandle, List<CustomAttributeHandle>> FindDeclarations(CancellationToken cancellation)
     {
         Dictionary<EntityHandle, List<CustomAttributeHandle>> found = [];
-        HashSet<PropertyDefinitionHandle> generated = [];
         foreach (CustomAttributeHandle handle in _metadata.CustomAttributes)
         {
             cancellation.ThrowIfCancellationRequested();
@@ -72,9 +75,9 @@ internal sealed class AssemblyReader
             {
                 ThrowIfReferenceAssembly(attribute);
             }
-            else if (target.Kind == HandleKind.PropertyDefinition && _attributes.IsOwnGeneratedCode(attribute))
+            else if (target.Kind is HandleKind.PropertyDefinition or HandleKind.MethodDefinition && _attributes.IsOwnGeneratedCode(attribute))
             {
-                _ = generated.Add((PropertyDefinitionHandle)target);
+                _ = _generated.Add(target);
             }
             else if (target.Kind is HandleKind.TypeDefinition or HandleKind.MethodDefinition && _attributes.OwnAttributeName(attribute) is not null)
             {
@@ -87,13 +90,13 @@ internal sealed class AssemblyReader
             }
         }
 
-        AddUndeclared(generated, found);
+        AddUndeclared(found);
         return found;
     }
 
-    private void AddUndeclared(HashSet<PropertyDefinitionHandle> generated, Dictionary<EntityHandle, List<CustomAttributeHandle>> found)
+    private void AddUndeclared(Dictionary<EntityHandle, List<CustomAttributeHandle>> found)
     {
-        if (generated.Count == 0)
+        if (_generated.Count == 0)
         {
             return;
         }
@@ -102,7 +105,7 @@ internal sealed class AssemblyReader
         {
             foreach (PropertyDefinitionHandle property in _metadata.GetTypeDefinition(type).GetProperties())
             {
-                if (generated.Contains(property))
+                if (_generated.Contains(property))
                 {
                     _ = found.TryAdd(type, []);
                 }
@@ -129,7 +132,7 @@ internal sealed class AssemblyReader
         string name = _names.FullName(method.GetDeclaringType()) + "." + _metadata.GetString(method.Name);
         List<Declaration> declarations = ReadDeclarations(attributes, out Dictionary<string, string> unread);
         return new FoundType(
-            name, declarations, new Dictionary<string, FoundSpan>(), new Dictionary<string, FoundConstant>(), new Dictionary<string, string>(), unread);
+            name, declarations, new Dictionary<string, FoundSpan>(), new Dictionary<string, FoundConstant>(), [], new Dictionary<string, string>(), unread);
     }
 
     private FoundType ReadType(TypeDefinitionHandle type, List<CustomAttributeHandle> attributes)
@@ -145,7 +148,11 @@ internal sealed class AssemblyReader
         Dictionary<string, string> unreadSpans = new(StringComparer.Ordinal);
         ReadSpans(type, spans, unreadSpans);
         ReadConstants(type, constants);
-        return new FoundType(_names.FullName(type), declarations, spans, constants, unreadSpans, unreadDeclarations);
+        FoundMethod[] methods =
+        [
+            .. _metadata.GetTypeDefinition(type).GetMethods().Where(method => _generated.Contains(method)).Select(_literals.Read),
+        ];
+        return new FoundType(_names.FullName(type), declarations, spans, constants, methods, unreadSpans, unreadDeclarations);
     }
 
     private List<Declaration> ReadDeclarations(List<CustomAttributeHandle> attributes, out Dictionary<string, string> unread)

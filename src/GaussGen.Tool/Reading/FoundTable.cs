@@ -52,6 +52,11 @@ internal sealed record FoundSpan(string Name, ElementType Element, ReadOnlyMemor
 /// <param name="Bits">Its bits, zero-extended.</param>
 internal sealed record FoundConstant(string Name, ElementType Element, ulong Bits);
 
+/// <summary>A generated method, and the floating-point constants that its code holds.</summary>
+/// <param name="Name">The method's name; its overloads have the same.</param>
+/// <param name="Literals">The constants, as often and in the order in which the code has them.</param>
+internal sealed record FoundMethod(string Name, IReadOnlyList<FoundConstant> Literals);
+
 /// <summary>
 /// A type that declares one table or more, with all the data it was found to hold. What could not be read is named with the
 /// reason, so that nothing is passed over.
@@ -60,6 +65,7 @@ internal sealed record FoundConstant(string Name, ElementType Element, ulong Bit
 /// <param name="Declarations">The table attributes on it, in metadata order.</param>
 /// <param name="Spans">Data by property name.</param>
 /// <param name="Constants">Constants by name.</param>
+/// <param name="Methods">The generated methods.</param>
 /// <param name="UnreadSpans">By property name, why its data could not be read.</param>
 /// <param name="UnreadDeclarations">By attribute name, why its arguments could not be read; "?" where the attribute is gone.</param>
 internal sealed record FoundType(
@@ -67,6 +73,7 @@ internal sealed record FoundType(
     IReadOnlyList<Declaration> Declarations,
     IReadOnlyDictionary<string, FoundSpan> Spans,
     IReadOnlyDictionary<string, FoundConstant> Constants,
+    IReadOnlyList<FoundMethod> Methods,
     IReadOnlyDictionary<string, string> UnreadSpans,
     IReadOnlyDictionary<string, string> UnreadDeclarations);
 

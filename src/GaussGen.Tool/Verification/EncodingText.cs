@@ -26,6 +26,6 @@ internal static class UlpText
     /// <summary>Four decimals where that says something, an order of magnitude beyond.</summary>
     public static string Of(double distance) =>
         double.IsPositiveInfinity(distance) ? "infinitely many"
-        : distance < 1e4 ? distance.ToString("0.####", CultureInfo.InvariantCulture)
+        : distance < 1e4 ? distance.ToString("0.0000", CultureInfo.InvariantCulture)
         : distance.ToString("0.##E+0", CultureInfo.InvariantCulture);
 }

@@ -6,6 +6,7 @@ using System.Reflection;
 using System.Reflection.Metadata;
 using System.Reflection.Metadata.Ecma335;
 using System.Reflection.PortableExecutable;
+using GaussGen.Tool.Reading;
 
 namespace GaussGen.Tool.Tests.Fixtures;
 
@@ -13,8 +14,8 @@ namespace GaussGen.Tool.Tests.Fixtures;
 internal readonly record struct Place(int Offset, int Length);
 
 /// <summary>
-/// Where a compiled file keeps its tables, found through the tables of the metadata alone (ECMA-335, II.22): nothing of the reader
-/// under test is used.
+/// Where a compiled file keeps its tables, found through the tables of the metadata (ECMA-335, II.22) and by looking at every
+/// method's code; which of it belongs to what is the business of the reader under test.
 /// </summary>
 internal sealed class ImagePlaces
 {
@@ -43,6 +44,12 @@ internal sealed class ImagePlaces
                     start + metadata.GetHeapMetadataOffset(HeapIndex.Blob) + metadata.GetHeapOffset(blob) + 1, metadata.GetBlobReader(blob).Length))
                 .Distinct(),
         ];
+        CodeConstants =
+        [
+            .. metadata.MethodDefinitions.Select(metadata.GetMethodDefinition)
+                .Where(method => method.RelativeVirtualAddress != 0)
+                .SelectMany(method => Operands(image, executable, method)),
+        ];
         DataAddresses = Rows(metadata, start, TableIndex.FieldRva, 0, RvaSize);
 
         // The rows of this table are in the order of the types that have one; the user's structs are among them.
@@ -60,6 +67,9 @@ internal sealed class ImagePlaces
     /// <summary>The values of constants.</summary>
     public IReadOnlyList<Place> Constants { get; }
 
+    /// <summary>The floating-point constants in code.</summary>
+    public IReadOnlyList<Place> CodeConstants { get; }
+
     /// <summary>The addresses of mapped data.</summary>
     public IReadOnlyList<Place> DataAddresses { get; }
 
@@ -71,6 +81,16 @@ internal sealed class ImagePlaces
         .. Enumerable.Range(0, metadata.GetTableRowCount(table))
             .Select(row => new Place(start + metadata.GetTableMetadataOffset(table) + (row * metadata.GetTableRowSize(table)) + column, length)),
     ];
+
+    private static IEnumerable<Place> Operands(byte[] image, PEReader executable, MethodDefinition method)
+    {
+        const byte TinyHeader = 2;
+        int header = Offset(executable.PEHeaders, method.RelativeVirtualAddress);
+        int code = header + ((image[header] & 3) == TinyHeader ? 1 : 12);
+        return new InstructionDecoder().Decode(executable.GetMethodBody(method.RelativeVirtualAddress).GetILReader())
+            .Where(instruction => instruction.Code is ILOpCode.Ldc_r8 or ILOpCode.Ldc_r4)
+            .Select(instruction => new Place(code + instruction.Offset + 1, instruction.Code == ILOpCode.Ldc_r8 ? 8 : 4));
+    }
 
     private static int Offset(PEHeaders headers, int address)
     {

@@ -40,7 +40,7 @@ public class TamperingTests
     {
         byte[] image = FixtureCompiler.Generate(Sources.Small, framework);
         ImagePlaces places = new(image);
-        (int Offset, int Bit)[] flips = [.. places.Data.Concat(places.Constants).SelectMany(Bits)];
+        (int Offset, int Bit)[] flips = [.. places.Data.Concat(places.Constants).Concat(places.CodeConstants).SelectMany(Bits)];
         Assert.InRange(flips.Length, 10_000, 30_000);
         AssertCaught(image, flips);
     }
@@ -161,7 +161,8 @@ public class TamperingTests
     private static bool IsSame(FoundType a, FoundType b) =>
         a.Spans.Count == b.Spans.Count
         && a.Spans.All(span => b.Spans.TryGetValue(span.Key, out FoundSpan? other) && span.Value.Data.Span.SequenceEqual(other.Data.Span))
-        && a.Constants.OrderBy(constant => constant.Key).SequenceEqual(b.Constants.OrderBy(constant => constant.Key));
+        && a.Constants.OrderBy(constant => constant.Key).SequenceEqual(b.Constants.OrderBy(constant => constant.Key))
+        && a.Methods.SelectMany(method => method.Literals).SequenceEqual(b.Methods.SelectMany(method => method.Literals));
 
     private static IReadOnlyList<FoundType>? TryRead(byte[] bytes)
     {
