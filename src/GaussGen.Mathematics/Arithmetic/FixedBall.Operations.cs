@@ -85,7 +85,8 @@ public readonly partial struct FixedBall
         bool isBelow = left.High < right.High || (left.High == right.High && left.Low < right.Low);
         // ⌊M · 2^shift / N⌋ with its leading bit set.
         int shift = isBelow ? 128 : 127;
-        FixedDivision.Quotient(left.High, left.Low, shift, right.High, right.Low, out ulong high, out ulong low, out bool isExact);
+        FixedDivision.Quotient(
+            left.High, left.Low, shift, right.High, right.Low, out ulong high, out ulong low, out bool isExact);
         // In units of the quotient Q = 2^shift·M/N: ((M + r)/(N − s) − M/N)·2^shift = 2^shift·(r + (M/N)s)/(N − s), where
         // 2^shift/N ≤ 2 and M/N < 1 for shift 128, 2^shift/N ≤ 1 and M/N < 2 for 127; so at most 2(r + s)·N/(N − s),
         // and N/(N − s) ≤ 1 + 2^−64 for s ≤ 2^62, which adds one unit at most.
@@ -114,8 +115,12 @@ public readonly partial struct FixedBall
         int shift = High != 0 ? WideProduct.LeadingZeros(High) : 64 + WideProduct.LeadingZeros(Low);
         ulong high = shift >= 64 ? Low << (shift - 64) : shift == 0 ? High : (High << shift) | (Low >> (64 - shift));
         ulong low = shift >= 64 ? 0 : Low << shift;
-        bool fits = RadiusUnits == 0 || (shift < 64 && RadiusUnits <= ulong.MaxValue >> shift);
-        ulong radius = fits ? (RadiusUnits == 0 ? 0 : RadiusUnits << shift) : throw new OverflowException("The radius does not fit.");
+        if (RadiusUnits != 0 && (shift >= 64 || RadiusUnits > ulong.MaxValue >> shift))
+        {
+            throw new OverflowException("The radius does not fit into 64 bits once the leading bit of the mantissa is set.");
+        }
+
+        ulong radius = RadiusUnits == 0 ? 0 : RadiusUnits << shift;
         return new FixedBall(high, low, checked(Exponent - shift), IsNegative, radius);
     }
 

@@ -3,7 +3,9 @@ using System.Threading;
 
 namespace GaussGen.Mathematics.Arithmetic;
 
-/// <summary>Constants in fixed-size integers, for a first try. Each is off by less than one unit, and a test holds them to <see cref="Constants"/>.</summary>
+/// <summary>
+/// Constants in fixed-size integers, for a first try. Each is off by less than one unit; a test holds them to <see cref="Constants"/>.
+/// </summary>
 internal static class FixedConstants
 {
     /// <summary>1/√2.</summary>
@@ -16,7 +18,8 @@ internal static class FixedConstants
     internal static FixedBall SqrtPi => new(0xe2dfc48da77b553c, 0xe1d82906aedc9c1f, -127, false, 1);
 
     /// <summary>A constant that is also known at any precision.</summary>
-    internal static RealNumber ToRealNumber(FixedBall first, Func<int, CancellationToken, Ball> enclose) => new Constant(first, enclose);
+    internal static RealNumber ToRealNumber(FixedBall first, Func<int, CancellationToken, Ball> enclose) =>
+        new Constant(first, enclose);
 
     private sealed class Constant(FixedBall first, Func<int, CancellationToken, Ball> enclose) : RealNumber
     {

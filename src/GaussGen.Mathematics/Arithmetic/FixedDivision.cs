@@ -12,7 +12,14 @@ internal static class FixedDivision
     /// M &lt; N and shift 128, or M ≥ N and shift 127.
     /// </summary>
     internal static void Quotient(
-        ulong high, ulong low, int shift, ulong divisorHigh, ulong divisorLow, out ulong quotientHigh, out ulong quotientLow, out bool isExact)
+        ulong high,
+        ulong low,
+        int shift,
+        ulong divisorHigh,
+        ulong divisorLow,
+        out ulong quotientHigh,
+        out ulong quotientLow,
+        out bool isExact)
     {
         double reciprocal = 1.0 / divisorHigh;
         var remainder = new Remainder(high, low);
@@ -71,7 +78,7 @@ internal static class FixedDivision
         internal readonly bool IsAtLeast(ulong high, ulong low) =>
             _high > 0 || (_high == 0 && (_middle > high || (_middle == high && _low >= low)));
 
-        /// <summary>Shifts left by less than 64, and takes off a multiple of the divisor so that about one divisor is left at most.</summary>
+        /// <summary>Shifts left by less than 64, and takes off so many divisors that about one is left at most.</summary>
         [MethodImpl(MethodImplOptions.AggressiveInlining)]
         internal long TakeDigit(int shift, double reciprocal, ulong divisorHigh, ulong divisorLow)
         {

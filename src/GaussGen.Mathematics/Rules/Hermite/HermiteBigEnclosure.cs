@@ -24,7 +24,7 @@ internal static class HermiteBigEnclosure
     /// <param name="point">X, where <see cref="HermiteEnclosure.TryEnclose"/> succeeded.</param>
     /// <param name="precision">The bits that are wanted; the relative radii are about 2^−precision or less.</param>
     /// <param name="cancellation">Looked at between terms and steps.</param>
-    internal static (Ball Node, Ball Weight) Enclose(HermiteFamilyMember rule, uint point, int precision, CancellationToken cancellation)
+    internal static (Ball Node, Ball Weight) Enclose(HermiteRule rule, uint point, int precision, CancellationToken cancellation)
     {
         int points = rule.Points;
         int working = checked(precision + GuardBits);

@@ -15,7 +15,8 @@ internal static class HermiteBigRecurrence
     /// <param name="roots">√k at index k, up to n.</param>
     /// <param name="precision">p: of two neighbours, one is kept at 2^p units at least.</param>
     /// <param name="cancellation">Looked at every few steps.</param>
-    internal static (Ball Value, Ball Lower) Evaluate(int points, uint point, double[] roots, int precision, CancellationToken cancellation)
+    internal static (Ball Value, Ball Lower) Evaluate(
+        int points, uint point, double[] roots, int precision, CancellationToken cancellation)
     {
         // M₀ = 2^(p+31) and M₁ = X·2^(p−1), exactly; S counts the scale as in HermiteRecurrence.
         BigInteger previous = BigInteger.One << (precision + 31);
@@ -50,12 +51,10 @@ internal static class HermiteBigRecurrence
         }
 
         int exponent = (HermiteRecurrence.StepBits * points) - scale;
-        return (
-            new Ball(current, exponent, HermiteErrorBound.ToBound(HermiteErrorBound.AtEnd(error), exponent)),
-            new Ball(
-                previous,
-                exponent - HermiteRecurrence.StepBits,
-                HermiteErrorBound.ToBound(HermiteErrorBound.BeforeEnd(error, roots[points]), exponent - HermiteRecurrence.StepBits)));
+        int lower = exponent - HermiteRecurrence.StepBits;
+        Bound radius = HermiteErrorBound.ToBound(HermiteErrorBound.AtEnd(error), exponent);
+        Bound lowerRadius = HermiteErrorBound.ToBound(HermiteErrorBound.BeforeEnd(error, roots[points]), lower);
+        return (new Ball(current, exponent, radius), new Ball(previous, lower, lowerRadius));
     }
 
     private static bool IsWithin(BigInteger value, BigInteger limit) => BigInteger.Abs(value) < limit;

@@ -27,7 +27,8 @@ internal static class HermiteEnclosure
     /// <param name="factor">(n−1)!/n.</param>
     /// <param name="node">The zero; its radius may be too wide to be of use.</param>
     /// <param name="weight">(n−1)!/(n·Heₙ₋₁²) at the zero; its radius may be too wide to be of use.</param>
-    internal static bool TryEnclose(int points, uint point, double[] roots, in FixedBall factor, out FixedBall node, out FixedBall weight)
+    internal static bool TryEnclose(
+        int points, uint point, double[] roots, in FixedBall factor, out FixedBall node, out FixedBall weight)
     {
         node = weight = default;
         if (!HermiteRecurrence.IsCovered(points, point))
@@ -112,7 +113,8 @@ internal static class HermiteEnclosure
         // X/2²⁵ + η/2²⁵ with 121 bits behind the point; one unit for the bits of η that are dropped, one for the bound's conversion.
         TaylorFixed offset = taylor.Zero.ShiftRight(HermiteRecurrence.PointBits - 1);
         ulong radius = ToUnits(taylor.ZeroError, 1.0 / (1 << (HermiteRecurrence.PointBits - 1)));
-        return new FixedBall((ulong)(((long)point << 32) + offset.High), offset.Low, -TaylorFixed.FractionBits - 1, false, radius).Normalize();
+        var high = (ulong)(((long)point << 32) + offset.High);
+        return new FixedBall(high, offset.Low, -TaylorFixed.FractionBits - 1, false, radius).Normalize();
     }
 
     private static FixedBall Weight(in FixedBall lower, in FixedBall factor, in HermiteTaylor taylor)

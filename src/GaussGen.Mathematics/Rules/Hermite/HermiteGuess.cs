@@ -12,6 +12,9 @@ internal static class HermiteGuess
     private const int TaylorTerms = 10;
     private const double Large = 1e100;
 
+    private static readonly double[] Reciprocals =
+        [0, 1, 1.0 / 2, 1.0 / 3, 1.0 / 4, 1.0 / 5, 1.0 / 6, 1.0 / 7, 1.0 / 8, 1.0 / 9, 1.0 / 10];
+
     /// <summary>The ⌊n/2⌋ positive zeros of Heₙ, ascending, to about half the digits of a double or better.</summary>
     /// <exception cref="OperationCanceledException">The token was cancelled.</exception>
     internal static double[] PositiveZeros(int points, CancellationToken cancellation)
@@ -148,6 +151,4 @@ internal static class HermiteGuess
 
         return h;
     }
-
-    private static readonly double[] Reciprocals = [0, 1, 1.0 / 2, 1.0 / 3, 1.0 / 4, 1.0 / 5, 1.0 / 6, 1.0 / 7, 1.0 / 8, 1.0 / 9, 1.0 / 10];
 }

@@ -33,19 +33,22 @@ internal static class HermiteRecurrence
         var values = new HermiteValues(point);
         int turn = HermiteErrorBound.Turn(point);
         Advance(ref values, point, roots, 1, turn);
-        values.Error = HermiteErrorBound.AtTurn(turn, point, values.Current.ToDouble() * UnitBelow, values.Previous.ToDouble() * UnitBelow);
+        double current = values.Current.ToDouble() * UnitBelow, previous = values.Previous.ToDouble() * UnitBelow;
+        values.Error = HermiteErrorBound.AtTurn(turn, point, current, previous);
         Advance(ref values, point, roots, turn + 1, points - 1);
         return values;
     }
 
     /// <summary>Whether the error bound covers the recurrence up to degree n at the point.</summary>
-    internal static bool IsCovered(int points, uint point) => point > 0 && point < 1U << 31 && HermiteErrorBound.Turn(point) <= points - 2;
+    internal static bool IsCovered(int points, uint point) =>
+        point > 0 && point < 1U << 31 && HermiteErrorBound.Turn(point) <= points - 2;
 
     /// <summary>The steps from degree k to k + 1 for the given k.</summary>
     private static void Advance(ref HermiteValues values, uint point, double[] roots, int first, int last)
     {
-        long c0 = values.Current.Digit0, c1 = values.Current.Digit1, c2 = values.Current.Digit2, c3 = values.Current.Digit3, c4 = values.Current.Digit4;
-        long p0 = values.Previous.Digit0, p1 = values.Previous.Digit1, p2 = values.Previous.Digit2, p3 = values.Previous.Digit3, p4 = values.Previous.Digit4;
+        HermiteDigits start = values.Current, before = values.Previous;
+        long c0 = start.Digit0, c1 = start.Digit1, c2 = start.Digit2, c3 = start.Digit3, c4 = start.Digit4;
+        long p0 = before.Digit0, p1 = before.Digit1, p2 = before.Digit2, p3 = before.Digit3, p4 = before.Digit4;
         long x = point;
         double error = values.Error;
         for (int k = first; k <= last; k++)

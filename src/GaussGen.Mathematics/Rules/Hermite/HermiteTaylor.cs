@@ -78,14 +78,14 @@ internal struct HermiteTaylor
         return true;
     }
 
-    /// <summary>The terms up to the third in double arithmetic; each round of the iteration gains 17 bits.</summary>
+    /// <summary>The terms up to the third in double arithmetic; the start and each round give 18 bits.</summary>
     private readonly double Seed()
     {
         double x = _point * UnitOf50, u = _u.ToDouble();
         double second = 0.5 * (x - (_points * UnitOf50 * u));
         double third = ((2 * x * second) - ((_points - 1) * UnitOf50)) / 6;
         double eta = -u;
-        for (int round = 0; round < 3; round++)
+        for (int round = 0; round < 2; round++)
         {
             eta = -(u + (eta * eta * (second + (eta * third))));
         }
@@ -124,7 +124,7 @@ internal struct HermiteTaylor
             + (residual * ((5 * ratio * ratio) + (1.1 * growth * residual) + slopeError))
             + Rounding;
         ZeroError = HermiteErrorBound.Slack * zeroError;
-        SlopeError = HermiteErrorBound.Slack
-            * (slopeError + (1.1 * growth * zeroError) + (growth * growth * residual * ((growth * eta * eta) + residual)) + Rounding);
+        double bendError = growth * growth * residual * ((growth * eta * eta) + residual);
+        SlopeError = HermiteErrorBound.Slack * (slopeError + (1.1 * growth * zeroError) + bendError + Rounding);
     }
 }

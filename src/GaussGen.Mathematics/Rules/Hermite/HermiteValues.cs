@@ -1,4 +1,5 @@
 using System.Numerics;
+using GaussGen.Mathematics.Arithmetic;
 
 namespace GaussGen.Mathematics.Rules.Hermite;
 
@@ -38,12 +39,7 @@ internal readonly struct HermiteDigits(long digit0, long digit1, long digit2, lo
             word2++;
         }
 
-        int shift = 0;
-        while (word2 >> shift != 0)
-        {
-            shift++;
-        }
-
+        int shift = 64 - WideProduct.LeadingZeros(word2);
         high = shift == 0 ? word1 : (word2 << (64 - shift)) | (word1 >> shift);
         low = shift == 0 ? word0 : (word1 << (64 - shift)) | (word0 >> shift);
         return shift;

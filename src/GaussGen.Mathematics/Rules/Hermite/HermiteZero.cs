@@ -8,7 +8,7 @@ namespace GaussGen.Mathematics.Rules.Hermite;
 /// <param name="points">n.</param>
 /// <param name="convention">The weight function.</param>
 /// <param name="roots">√k at index k, from 0 to n.</param>
-internal sealed class HermiteFamilyMember(int points, HermiteConvention convention, double[] roots)
+internal sealed class HermiteRule(int points, HermiteConvention convention, double[] roots)
 {
     private Boxed? _factorial;
 
@@ -40,7 +40,7 @@ internal sealed class HermiteFamilyMember(int points, HermiteConvention conventi
 /// <param name="point">X, where the zero was proven to lie beside x = X/2²⁵.</param>
 /// <param name="node">The node in fixed-size integers, if it is narrow enough.</param>
 /// <param name="weight">The weight in fixed-size integers, if it is narrow enough.</param>
-internal sealed class HermiteZero(HermiteFamilyMember rule, uint point, FixedBall? node, FixedBall? weight)
+internal sealed class HermiteZero(HermiteRule rule, uint point, FixedBall? node, FixedBall? weight)
 {
     // The last enclosure, as node and weight are asked for in turn at the same precision.
     private Enclosure? _last;

@@ -28,9 +28,10 @@ internal static class HermiteZeros
     }
 
     /// <summary>The zeros, or <c>null</c> where the guesses do not lead to disjoint intervals with one zero each.</summary>
-    internal static HermiteZero[]? TryProve(int points, HermiteConvention convention, double[] guesses, CancellationToken cancellation)
+    internal static HermiteZero[]? TryProve(
+        int points, HermiteConvention convention, double[] guesses, CancellationToken cancellation)
     {
-        var rule = new HermiteFamilyMember(points, convention, Roots(points));
+        var rule = new HermiteRule(points, convention, Roots(points));
         FixedBall factor = Factor(points);
         var zeros = new HermiteZero[guesses.Length];
         uint before = 0;
@@ -53,7 +54,8 @@ internal static class HermiteZeros
                 weight = FixedBall.Multiply(in weight, FixedConstants.SqrtPi);
             }
 
-            zeros[i] = new HermiteZero(rule, point, node.WidenTo(HermiteEnclosure.NodeRadius), weight.WidenTo(HermiteEnclosure.WeightRadius));
+            zeros[i] = new HermiteZero(
+                rule, point, node.WidenTo(HermiteEnclosure.NodeRadius), weight.WidenTo(HermiteEnclosure.WeightRadius));
             before = point;
         }
 
