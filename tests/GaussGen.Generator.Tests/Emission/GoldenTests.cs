@@ -40,7 +40,8 @@ public sealed class GoldenTests
                 }
             }
         }
-        """) { Framework = Framework.NetStandard20 });
+        """)
+    { Framework = Framework.NetStandard20 });
 
     [Fact]
     public void Moments() => Verify("Moments.txt", new Consumer(
