@@ -26,7 +26,10 @@ internal static class Application
                 .UseStrictParsing()
                 .PropagateExceptions();
             _ = configuration.AddCommand<VerifyCommand>("verify")
-                .WithDescription("Prove every table of compiled assemblies, without running them.")
+                .WithDescription(
+                    "Prove every table of compiled assemblies, without running them. "
+                    + "The exit code is 0 if all is proven, 1 if something is wrong or could not be proven, "
+                    + "2 if something could not be read, no table was found, or the command line is wrong.")
                 .WithExample("verify", "bin/Release/net8.0/SurveyBoat.dll")
                 .WithExample("verify", "bin/Release", "--sarif", "proofs.sarif", "--junit", "proofs.xml")
                 .WithData(terminal);

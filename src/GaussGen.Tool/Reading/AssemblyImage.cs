@@ -77,12 +77,13 @@ internal sealed class AssemblyImage : IDisposable
     {
         try
         {
-            using FileStream stream = new(path, FileMode.Open, FileAccess.Read, FileShare.ReadWrite | FileShare.Delete, bufferSize: 1);
-            if (!stream.CanSeek)
+            // Pipes and devices have no length either, and to open one may wait for ever.
+            if (new FileInfo(path).Length == 0)
             {
-                throw new UnreadableException(UnreadableReason.Unopenable, "is a pipe or a device; name a regular file");
+                throw new UnreadableException(UnreadableReason.NotAnImage, "is empty, or no regular file; name a .NET assembly (.dll or .exe)");
             }
 
+            using FileStream stream = new(path, FileMode.Open, FileAccess.Read, FileShare.ReadWrite | FileShare.Delete, bufferSize: 1);
             long length = stream.Length;
             if (length > MaximumLength)
             {

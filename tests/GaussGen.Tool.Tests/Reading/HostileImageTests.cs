@@ -16,6 +16,9 @@ public class HostileImageTests
 {
     private const int Cases = 50_000;
 
+    // A table may have 64 MiB, and no case here names more than one.
+    private const long MostMemory = 80L << 20;
+
     private const string Source = """
         using System;
         using GaussGen;
@@ -49,6 +52,7 @@ public class HostileImageTests
         Parallel.For(0, Cases, index =>
         {
             byte[] image = Damaged(new Random(index));
+            long before = GC.GetAllocatedBytesForCurrentThread();
             try
             {
                 _ = Read(image);
@@ -59,6 +63,8 @@ public class HostileImageTests
                 Assert.DoesNotContain('\n', error.Message);
                 _ = Interlocked.Increment(ref refused);
             }
+
+            Assert.InRange(GC.GetAllocatedBytesForCurrentThread() - before, 0, MostMemory);
         });
 
         Assert.Equal(Cases, read + refused);
@@ -113,6 +119,35 @@ public class HostileImageTests
         new Random(length).NextBytes(bytes);
         UnreadableException error = Assert.Throws<UnreadableException>(() => AssemblyImage.FromBytes(bytes));
         Assert.Equal(UnreadableReason.NotAnImage, error.Reason);
+    }
+
+    /// <summary>Sizes that would fill the memory if they were believed: of an array, of mapped data, of an attribute's array.</summary>
+    [Theory]
+    [InlineData("[GaussHermite(1)] class T { static readonly double[] A = new double[0x12345678]; public static ReadOnlySpan<double> Nodes => A; }", 0x12345678, 0x7FFFFFFF)]
+    [InlineData("[GaussHermite(1)] class T { static readonly double[] A = new double[0x12345678]; public static ReadOnlySpan<double> Nodes => A; }", 0x12345678, 0x00900000)]
+    [InlineData("[GaussHermite(1)] class T { public static ReadOnlySpan<double> Nodes => new double[] { 1, 2, 3, 4, 5 }; }", 40, 0x7FFFFFFF)]
+    public void Stated_sizes_are_not_believed(string source, int size, int changed)
+    {
+        byte[] image = FixtureCompiler.Compile("using System; using GaussGen; " + source);
+        byte[] from = BitConverter.GetBytes(size);
+        for (int place = 0; place + from.Length <= image.Length; place++)
+        {
+            if (image.AsSpan(place, from.Length).SequenceEqual(from))
+            {
+                BitConverter.TryWriteBytes(image.AsSpan(place), changed);
+            }
+        }
+
+        long before = GC.GetAllocatedBytesForCurrentThread();
+        try
+        {
+            Assert.DoesNotContain("Nodes", Assert.Single(Read(image).Types).Spans.Keys);
+        }
+        catch (UnreadableException)
+        {
+        }
+
+        Assert.InRange(GC.GetAllocatedBytesForCurrentThread() - before, 0, 16L << 20);
     }
 
     [Fact]
