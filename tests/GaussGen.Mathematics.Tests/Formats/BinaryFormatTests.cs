@@ -145,6 +145,16 @@ public class BinaryFormatTests
 
     [Theory]
     [MemberData(nameof(Formats))]
+    public void Zero_has_the_smallest_numbers_for_neighbours_and_is_positive_as_their_neighbour(BinaryFormat format)
+    {
+        ulong below = format.SignBit | 1;
+        Assert.Equal((1UL, below), (format.Next(0), format.Previous(0)));
+        Assert.Equal((1UL, below), (format.Next(format.SignBit), format.Previous(format.SignBit)));
+        Assert.Equal((0UL, 0UL), (format.Next(below), format.Previous(1)));
+    }
+
+    [Theory]
+    [MemberData(nameof(Formats))]
     public void The_rounding_interval_is_where_a_number_is_the_nearest(BinaryFormat format) =>
         Gen.Select(Numbers.Encoding(format), Gen.Int[1, 2000]).Sample(
             (bits, distance) =>

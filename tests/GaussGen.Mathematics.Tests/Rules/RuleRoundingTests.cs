@@ -59,6 +59,15 @@ public class RuleRoundingTests
     }
 
     [Fact]
+    public void The_mirror_image_of_a_node_that_rounds_to_zero_is_plus_zero()
+    {
+        double tiny = Math.ScaleB(1, -30);
+        RuleTable table = Symmetric([-tiny, tiny], [3, 3], []);
+        RoundedRule rule = RuleRounding.Round(table, BinaryFormat.Binary16, dropZeroWeights: false, CancellationToken.None);
+        Assert.Equal([0UL, 0UL], rule.Nodes.Select(value => value.Bits));
+    }
+
+    [Fact]
     public void Location_and_scale_are_rounded_with_the_reciprocal_of_the_total()
     {
         RuleTable table = Symmetric([-1, 1], [1, 1], []);
