@@ -32,6 +32,7 @@ internal static class Application
                     + "2 if something could not be read, no table was found, or the command line is wrong.")
                 .WithExample("verify", "bin/Release/net8.0/SurveyBoat.dll")
                 .WithExample("verify", "bin/Release", "--sarif", "proofs.sarif", "--junit", "proofs.xml")
+                .WithExample("verify", "bin/Release", "--report", "proofs.html")
                 .WithData(terminal);
         });
 

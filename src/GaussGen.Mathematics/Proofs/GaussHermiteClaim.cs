@@ -70,6 +70,15 @@ public sealed record GaussHermiteClaim : TableClaim
         DropZeroWeights ? ", without zero weights" : string.Empty);
 
     /// <inheritdoc/>
+    public override string Method =>
+        "Gauss–Hermite rules: the nodes are the zeros of the Hermite polynomial. For each node, the zeros beyond the two rounding "
+        + "midpoints of the found value are counted exactly, in integers, by the sign changes of the recurrence (Sturm 1829; "
+        + "Szegő, Orthogonal Polynomials, 3.3). The counts differ by one exactly if the zero of that rank lies between the "
+        + "midpoints, so that the found value is the nearest one. Each weight is the Christoffel number, enclosed over an "
+        + "enclosure of its zero that is narrowed until it lies between the midpoints around one representable value. At the end "
+        + "the sums Σ w xᵏ of the found entries are held against the moments of the weight function, a check on the proof itself.";
+
+    /// <inheritdoc/>
     public override TableProof Prove(TableData data, IProgress<double>? progress, CancellationToken cancellation) =>
         new HermiteProof(this, data).Run(progress, cancellation);
 }

@@ -14,6 +14,12 @@ public abstract record TableClaim(BinaryFormat Format)
     /// <summary>The promise in words, without markup: "Gauss–Hermite rule with 16 points, standard normal density".</summary>
     public abstract string Title { get; }
 
+    /// <summary>
+    /// How the promise is proven, in a few sentences without markup or line ends: for a reader who knows the mathematics and not
+    /// the code. The same for every claim of a family.
+    /// </summary>
+    public abstract string Method { get; }
+
     /// <summary>Proves or refutes every entry.</summary>
     /// <param name="data">The data that was found.</param>
     /// <param name="progress">Told the finished fraction, from 0 to 1, after each step of the proof; may be <c>null</c>.</param>

@@ -2,6 +2,7 @@ using System.Collections.Generic;
 using System.ComponentModel;
 using System.Linq;
 using GaussGen.Tool.Reports;
+using GaussGen.Tool.Reports.Html;
 using Spectre.Console;
 using Spectre.Console.Cli;
 
@@ -26,6 +27,10 @@ internal sealed class VerifySettings : CommandSettings
     [Description("Write the outcome as JSON.")]
     public string? Json { get; init; }
 
+    [CommandOption("--report <FILE>")]
+    [Description("Write a report with plots as one HTML file.")]
+    public string? Report { get; init; }
+
     [CommandOption("--allow-empty")]
     [Description("Let a run that finds no table end with 0.")]
     public bool AllowEmpty { get; init; }
@@ -40,6 +45,7 @@ internal sealed class VerifySettings : CommandSettings
         (JUnit, new JUnitReport()),
         (Sarif, new SarifReport()),
         (Json, new JsonReport()),
+        (Report, new HtmlReport()),
     }.Where(report => report.Path is not null).Select(report => (report.Path!, report.Writer));
 
     /// <inheritdoc/>
