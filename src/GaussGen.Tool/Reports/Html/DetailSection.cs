@@ -97,9 +97,9 @@ internal static class DetailSection
         {
             Begin(markup, "Nodes and weights of " + table.Table.Type.Name);
             stems.Write(markup, table.Id + "-stems");
-            End(markup, stems.Undrawn == 0
-                ? "Nodes and weights, as found"
-                : $"Nodes and weights, as found; {Counted.Of(stems.Undrawn, "pair is", "pairs are")} not finite and not drawn");
+            End(markup, "Nodes and weights, as found"
+                + (stems.OnAxis == 0 ? "" : $"; {Counted.Of(stems.OnAxis, "zero weight is", "zero weights are")} marked on the axis")
+                + (stems.Undrawn == 0 ? "" : $"; {Counted.Of(stems.Undrawn, "pair is", "pairs are")} not finite and not drawn"));
         }
 
         if (errors is not null)

@@ -52,7 +52,7 @@ internal sealed class ErrorPlot
 
         if (Count(Verdict.Proven) < Total)
         {
-            canvas.Text(PlotCanvas.Left - 8, PlotCanvas.Top + 14, "end", "not proven");
+            canvas.Text(PlotCanvas.Left - 8, PlotCanvas.Top + 14, "end", "failed");
         }
 
         canvas.Axes("entry, in the order of its member", "ulp");

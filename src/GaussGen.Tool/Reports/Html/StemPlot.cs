@@ -39,6 +39,9 @@ internal sealed class StemPlot
     /// <summary>How many pairs are not numbers that a plot can show.</summary>
     public int Undrawn { get; }
 
+    /// <summary>How many weights stand on the axis, because a logarithmic scale has no place for zero.</summary>
+    public int OnAxis => _isLogarithmic ? ZeroCount : 0;
+
     /// <summary>The plot of a table; null if it is no rule or has nothing to draw.</summary>
     public static StemPlot? Of(TableProof? proof)
     {
@@ -116,10 +119,9 @@ internal sealed class StemPlot
         int low = (int)Math.Floor(Math.Log10(SmallestAboveZero));
         int high = (int)Math.Ceiling(Math.Log10(Largest));
         PlotScale up = new(low, high, PlotCanvas.Bottom - 5, PlotCanvas.Top + 6);
-        int step = Math.Max(1, (int)Math.Ceiling((high - low) / 6.0));
-        for (int power = high - ((high - low) / step * step); power <= high; power += step)
+        foreach (double power in Ticks(low, high, 5).Where(power => power == Math.Round(power)))
         {
-            canvas.HorizontalTick(up.At(power), PowerOfTen(power));
+            canvas.HorizontalTick(up.At(power), PowerOfTen((int)power));
         }
 
         return (weight => up.At(Math.Log10(weight)), PlotCanvas.Bottom);

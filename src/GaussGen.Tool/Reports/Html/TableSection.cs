@@ -42,7 +42,7 @@ internal static class TableSection
             markup.Begin("div", ("class", "scroll"), ("tabindex", "0"), ("role", "region"), ("aria-label", "Tables of " + file.Name));
             markup.Begin("table");
             markup.Line("caption", file.File.Path);
-            Rows.Head(markup, "Type", "What", "Format", "Entries", "Proven", "Worst ulp", "Verdict");
+            Rows.Head(markup, "Type", "Verdict", "What", "Format", "Entries", "Proven", "Worst ulp");
             markup.Begin("tbody");
             foreach (ReportedTable table in file.Tables)
             {
@@ -64,12 +64,12 @@ internal static class TableSection
         markup.Begin("th", ("scope", "row"));
         markup.Line("a", table.Type.Name, ("href", "#" + row.Id));
         markup.End();
+        markup.Line("td", OutcomeText.Of(table.Verdict), ("class", table.Verdict == Verdict.Proven ? "verdict good" : "verdict bad"));
         markup.Line("td", table.What, ("class", "text"));
         markup.Line("td", table.Format);
         markup.Line("td", $"{table.Entries}", ("class", "number"));
         markup.Line("td", $"{table.Proven}", ("class", "number"));
         markup.Line("td", table.WorstDistanceInUlp is { } distance ? UlpText.Of(distance) : "?", ("class", "number"));
-        markup.Line("td", OutcomeText.Of(table.Verdict), ("class", table.Verdict == Verdict.Proven ? "verdict good" : "verdict bad"));
         markup.End();
     }
 }
