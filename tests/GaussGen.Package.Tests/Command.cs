@@ -33,7 +33,8 @@ internal static class Command
         ["DOTNET_NOLOGO"] = "1",
     };
 
-    public static CommandResult Dotnet(string folder, IReadOnlyDictionary<string, string> environment, params string[] arguments) =>
+    public static CommandResult Dotnet(
+        string folder, IReadOnlyDictionary<string, string> environment, params string[] arguments) =>
         Run(Environment.GetEnvironmentVariable("DOTNET_HOST_PATH") ?? "dotnet", folder, environment, arguments);
 
     public static CommandResult Run(

@@ -20,7 +20,8 @@ public sealed class PackedLibrary : IDisposable
     public PackedLibrary()
     {
         // No version is used twice, so that no cache can hold an older package of the same name.
-        Version = string.Create(CultureInfo.InvariantCulture, $"0.0.1-test.{DateTime.UtcNow:yyyyMMddHHmmss}.{Environment.ProcessId}");
+        Version = string.Create(
+            CultureInfo.InvariantCulture, $"0.0.1-test.{DateTime.UtcNow:yyyyMMddHHmmss}.{Environment.ProcessId}");
         Feed = Pack("packed");
         PackageFile = Path.Combine(Feed, $"GaussGen.{Version}.nupkg");
         SymbolsFile = Path.Combine(Feed, $"GaussGen.{Version}.snupkg");
@@ -45,11 +46,12 @@ public sealed class PackedLibrary : IDisposable
         string sources = Path.Combine(_root.FullName, name, "sources");
         string output = Path.Combine(_root.FullName, name, "feed");
         Sources.CopyTo(sources);
-        Command.Dotnet(sources, NoVariables, "pack", "src/GaussGen", "--output", output, $"-p:Version={Version}").RequireSuccess();
+        Command.Dotnet(sources, NoVariables, "pack", "src/GaussGen", "--output", output, $"-p:Version={Version}")
+            .RequireSuccess();
         return output;
     }
 
-    /// <summary>An empty folder outside the repository, with an empty package cache of its own beside the project's folder.</summary>
+    /// <summary>An empty folder outside the repository.</summary>
     public string NewFolder(string name) => _root.CreateSubdirectory(name).FullName;
 
     /// <summary>The contents of a package by path, without the container's own bookkeeping (ECMA-376, part 2).</summary>
@@ -71,7 +73,9 @@ public sealed class PackedLibrary : IDisposable
     public void Dispose() => _root.Delete(recursive: true);
 
     private static bool IsBookkeeping(string path) =>
-        path == "[Content_Types].xml" || path.StartsWith("_rels/", StringComparison.Ordinal) || path.StartsWith("package/", StringComparison.Ordinal);
+        path == "[Content_Types].xml"
+        || path.StartsWith("_rels/", StringComparison.Ordinal)
+        || path.StartsWith("package/", StringComparison.Ordinal);
 
     private string FindMachinePackages()
     {

@@ -12,7 +12,7 @@ internal static class Sources
     /// <summary>The repository's root, found from the folder that this test runs in.</summary>
     public static string Root { get; } = FindRoot();
 
-    /// <summary>Copies what a package is made of: the root's files and <c>src</c>, without anything that a build has left.</summary>
+    /// <summary>Copies what a package is made of, the root's files and <c>src</c>, without what a build has left.</summary>
     public static void CopyTo(string folder)
     {
         Directory.CreateDirectory(folder);

@@ -33,7 +33,7 @@ internal sealed class Stranger
             """);
     }
 
-    /// <summary>Writes a project that refers to the package; returns its folder's name, which is the project's name too.</summary>
+    /// <summary>Writes a project that refers to the package, or to other projects instead; returns its name.</summary>
     public string AddProject(string name, string properties, string source, params string[] projectReferences)
     {
         DirectoryInfo folder = Directory.CreateDirectory(Path.Combine(_folder, name));
