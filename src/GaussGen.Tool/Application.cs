@@ -25,6 +25,7 @@ internal static class Application
                 .ConfigureConsole(terminal.Results)
                 .UseStrictParsing()
                 .PropagateExceptions();
+            configuration.Settings.HelpProviderStyles = HelpStyle.Create();
             _ = configuration.AddCommand<VerifyCommand>("verify")
                 .WithDescription(
                     "Prove every table of compiled assemblies, without running them. "
@@ -59,6 +60,12 @@ internal static class Application
         catch (UnwritableException error)
         {
             terminal.WriteError(error.Message);
+            return ExitCode.NotRead;
+        }
+        catch (Exception error)
+        {
+            // Nothing is known to lead here; whatever does must not look like a proof, nor like a failed one.
+            terminal.WriteError($"this is a defect of gaussgen ({error.GetType().Name}: {error.Message}); report it with the command line");
             return ExitCode.NotRead;
         }
     }
