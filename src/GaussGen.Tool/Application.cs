@@ -13,6 +13,8 @@ namespace GaussGen.Tool;
 /// <summary>The command line: its verbs, and what becomes of what goes wrong.</summary>
 internal static class Application
 {
+    private const string BaselineVerb = "baseline";
+
     /// <summary>Runs one command line and returns the exit code.</summary>
     public static async Task<int> RunAsync(IReadOnlyList<string> arguments, Terminal terminal, CancellationToken cancellation)
     {
@@ -35,13 +37,38 @@ internal static class Application
                 .WithExample("verify", "bin/Release", "--sarif", "proofs.sarif", "--junit", "proofs.xml")
                 .WithExample("verify", "bin/Release", "--report", "proofs.html")
                 .WithData(terminal);
+            _ = configuration.AddBranch(BaselineVerb, branch =>
+            {
+                branch.SetDescription("Pin the tables that were reviewed in a small text file, and notice when they drift.");
+                branch.AddExample(BaselineVerb, "write", "bin/Release", "--file", "gaussgen.baseline");
+                branch.AddExample(BaselineVerb, "check", "bin/Release", "--file", "gaussgen.baseline");
+                _ = branch.AddCommand<BaselineWriteCommand>("write")
+                    .WithDescription("Write down every table: its identity, its claim and the digest of its data.")
+                    .WithExample(BaselineVerb, "write", "bin/Release/net8.0/SurveyBoat.dll")
+                    .WithData(terminal);
+                _ = branch.AddCommand<BaselineCheckCommand>("check")
+                    .WithDescription("Say which tables were added, removed or changed since; end with 1 if any was.")
+                    .WithExample(BaselineVerb, "check", "bin/Release/net8.0/SurveyBoat.dll")
+                    .WithData(terminal);
+            });
+            _ = configuration.AddCommand<ExportCommand>("export")
+                .WithDescription("Write proven tables for other programs: as a C header, CSV or JSON.")
+                .WithExample("export", "SurveyBoat.dll", "SurveyBoat.Sixteen", "--output", "sixteen.h", "--prefix", "boat_")
+                .WithExample("export", "SurveyBoat.dll", "--as", "csv")
+                .WithExample("export", "--rule", "gauss-hermite", "--points", "16", "--format", "binary32")
+                .WithExample("export", "--moments", "normal", "--mean", "1.5", "--standard-deviation", "0.25", "--as", "json")
+                .WithData(terminal);
+            _ = configuration.AddCommand<ExplainCommand>("explain")
+                .WithDescription("Show a reviewer one table on a page: definition, entries, residuals, plot, proof.")
+                .WithExample("explain", "SurveyBoat.dll", "SurveyBoat.Sixteen")
+                .WithData(terminal);
         });
 
         try
         {
-            if (arguments.Count == 0)
+            if (arguments is [] or [BaselineVerb])
             {
-                _ = await application.RunAsync(["--help"], cancellation).ConfigureAwait(false);
+                _ = await application.RunAsync([.. arguments, "--help"], cancellation).ConfigureAwait(false);
                 return ExitCode.NotRead;
             }
 
@@ -57,7 +84,7 @@ internal static class Application
             terminal.WriteError($"{error.Message.TrimEnd('.')}; see gaussgen --help");
             return ExitCode.NotRead;
         }
-        catch (UnwritableException error)
+        catch (Exception error) when (error is UnwritableException or InputException)
         {
             terminal.WriteError(error.Message);
             return ExitCode.NotRead;

@@ -1,6 +1,7 @@
 using System;
 using System.Collections.Frozen;
 using System.Collections.Generic;
+using System.Linq;
 using GaussGen.Mathematics.Proofs;
 using GaussGen.Tool.Reading;
 
@@ -14,7 +15,18 @@ namespace GaussGen.Tool.Claims;
 /// to them.
 /// </param>
 /// <param name="ReadClaim">Makes the claim of a declaration's arguments.</param>
-internal sealed record ClaimFamily(string Attribute, IReadOnlyList<string> Spans, bool IsLocated, Func<ClaimArguments, TableClaim> ReadClaim);
+internal sealed record ClaimFamily(string Attribute, IReadOnlyList<string> Spans, bool IsLocated, Func<ClaimArguments, TableClaim> ReadClaim)
+{
+    /// <summary>The integers that tell a rule's size and quality; moments have none.</summary>
+    private static readonly string[] RuleIntegers = ["PointCount", "DegreeOfExactness"];
+
+    /// <summary>Whether a constant is one of the integers that stand beside the family's spans.</summary>
+    public bool IsInteger(string constant) => Spans.Contains("Nodes") && RuleIntegers.Contains(constant);
+
+    /// <summary>Whether a constant repeats an entry of a span, as "Raw3" does.</summary>
+    public bool IsEntry(string constant) => Spans.Any(span =>
+        constant.Length > span.Length && constant.StartsWith(span, StringComparison.Ordinal) && constant.Skip(span.Length).All(char.IsAsciiDigit));
+}
 
 /// <summary>Every family there is. A new one is its claim in the mathematics and one line here.</summary>
 internal static class ClaimTable

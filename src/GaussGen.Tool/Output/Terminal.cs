@@ -52,6 +52,13 @@ internal sealed class Terminal
         console.Profile.Width = width;
     }
 
+    /// <summary>Writes a whole file to the results, as it is.</summary>
+    public void WriteFile(string text)
+    {
+        Results.Profile.Out.Writer.Write(text);
+        Results.Profile.Out.Writer.Flush();
+    }
+
     /// <summary>Writes one line on what went wrong.</summary>
     public void WriteError(string message) => WriteLine(Messages, "gaussgen: error: " + message, new Style(Color.Red));
 

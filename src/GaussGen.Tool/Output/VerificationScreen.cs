@@ -25,6 +25,17 @@ internal static class VerificationScreen
             ShowTable(file, terminal.Results);
         }
 
+        ShowFindings(result, terminal);
+        ShowUnread(result, terminal);
+        if (!isQuiet)
+        {
+            ShowSum(result, terminal.Results);
+        }
+    }
+
+    /// <summary>One line for each finding about a table.</summary>
+    public static void ShowFindings(VerificationResult result, Terminal terminal)
+    {
         foreach (FileResult file in result.Files)
         {
             foreach (TableResult table in file.Tables)
@@ -35,7 +46,11 @@ internal static class VerificationScreen
                 }
             }
         }
+    }
 
+    /// <summary>One line for each file that could not be read, and for finding nothing where something should be.</summary>
+    public static void ShowUnread(VerificationResult result, Terminal terminal)
+    {
         foreach (FileResult file in result.Unreadable)
         {
             Terminal.WriteLine(terminal.Messages, FindingLine.Of(file), Bad);
@@ -49,11 +64,6 @@ internal static class VerificationScreen
         if (result.IsEmpty && !result.NamedWithoutTable.Any() && !result.Unreadable.Any())
         {
             terminal.WriteError("no table was found; name the folder of a build that has one, or add --allow-empty");
-        }
-
-        if (!isQuiet)
-        {
-            ShowSum(result, terminal.Results);
         }
     }
 

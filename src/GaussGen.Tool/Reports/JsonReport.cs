@@ -92,7 +92,7 @@ internal sealed class JsonReport : IReportWriter
             json.WriteNumber("worstDistanceInUlp", distance);
         }
 
-        json.WriteString("verdict", table.Verdict switch { Verdict.Proven => "proven", Verdict.Wrong => "wrong", _ => "unproven" });
+        json.WriteString("verdict", VerdictText.Of(table.Verdict));
         json.WriteStartArray("findings");
         foreach (Finding finding in table.Findings)
         {

@@ -21,6 +21,9 @@ internal sealed record TableResult(
     /// <summary>The number format's name; "?" where no claim could be read.</summary>
     public string Format => Claim?.Format.Name ?? "?";
 
+    /// <summary>The digest of the table's data, as baselines name it; null where the table could not be read.</summary>
+    public string? Digest { get; init; }
+
     /// <summary>How many entries are proven.</summary>
     public int Proven => Proof?.ProvenCount ?? 0;
 

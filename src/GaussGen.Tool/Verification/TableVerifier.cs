@@ -6,7 +6,6 @@ using System.Linq;
 using System.Threading;
 using GaussGen.Mathematics.Formats;
 using GaussGen.Mathematics.Proofs;
-using GaussGen.Tool.Claims;
 using GaussGen.Tool.Output;
 using GaussGen.Tool.Reading;
 
@@ -36,28 +35,15 @@ internal sealed class TableVerifier
     /// <exception cref="OperationCanceledException">The token was cancelled.</exception>
     public TableResult Verify(DeclaredTable table, IProgress<double>? progress, CancellationToken cancellation)
     {
-        if (table.Declaration is null)
+        ReadTable read = ReadTable.Of(table);
+        if (read is not { Claim: { } claim, Data: { } data })
         {
-            return Unprovable(table, table.Type.UnreadDeclarations[table.Attribute]);
+            return Unprovable(table, read.Reason!, read.Claim);
         }
 
-        if (ClaimTable.Find(table.Attribute) is not { } family)
-        {
-            return Unprovable(table, $"[{table.Attribute}] is unknown to this version of the tool; install a newer one");
-        }
-
-        TableClaim? claim = null;
         try
         {
-            claim = ClaimTable.Read(family, table.Declaration);
-            string? unread = family.Spans.FirstOrDefault(table.Type.UnreadSpans.ContainsKey);
-            return unread is not null
-                ? Unprovable(table, $"{unread} cannot be read: {table.Type.UnreadSpans[unread]}", claim)
-                : Judge(table, Prove(claim, FoundData.Of(table.Type, family), progress, cancellation));
-        }
-        catch (ClaimException error)
-        {
-            return Unprovable(table, error.Message);
+            return Judge(table, Prove(claim, data, progress, cancellation)) with { Digest = TableDigest.Of(data, read.Family!) };
         }
         catch (Exception error) when (error is InvalidOperationException or ArithmeticException)
         {

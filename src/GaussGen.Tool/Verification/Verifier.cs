@@ -20,59 +20,65 @@ internal static class Verifier
     public static VerificationResult Run(
         IReadOnlyList<string> paths, bool allowEmpty, VerificationProgress progress, CancellationToken cancellation)
     {
+        IReadOnlyList<FileResult> files = Read(paths, progress, cancellation);
+        (int File, DeclaredTable Table)[] tables =
+        [
+            .. files.SelectMany((file, index) =>
+                (file.Assembly?.Types ?? []).SelectMany(DeclaredTable.Of).Select(table => (index, table))),
+        ];
+        TableResult[] results = Prove([.. tables.Select(table => table.Table)], progress, cancellation);
+        ILookup<int, TableResult> byFile = tables.Zip(results).ToLookup(pair => pair.First.File, pair => pair.Second);
+        return new VerificationResult([.. files.Select((file, index) => file with { Tables = [.. byFile[index]] })], allowEmpty);
+    }
+
+    /// <summary>Finds and reads files; none of their tables is proven, and the results have none.</summary>
+    /// <exception cref="OperationCanceledException">The token was cancelled.</exception>
+    public static IReadOnlyList<FileResult> Read(IReadOnlyList<string> paths, VerificationProgress progress, CancellationToken cancellation)
+    {
         IReadOnlyList<SearchedFile> files = AssemblySearch.Find(paths, cancellation);
-        ReadFile[] read = new ReadFile[files.Count];
+        FileResult[] read = new FileResult[files.Count];
         progress.BeginReading(files.Count);
         InParallel(Enumerable.Range(0, files.Count), index =>
         {
             read[index] = Read(files[index], cancellation);
             progress.EndFile();
         }, cancellation);
-
-        (int File, DeclaredTable Table)[] tables =
-        [
-            .. read.SelectMany((file, index) =>
-                (file.Assembly?.Types ?? []).SelectMany(DeclaredTable.Of).Select(table => (index, table))),
-        ];
-        TableResult[] results = Prove(tables, progress, cancellation);
-        ILookup<int, TableResult> byFile = tables.Zip(results).ToLookup(pair => pair.First.File, pair => pair.Second);
-        return new VerificationResult(
-            [.. files.Select((file, index) => new FileResult(file.Path, file.IsNamed, read[index].Assembly, read[index].Error, [.. byFile[index]]))],
-            allowEmpty);
+        return read;
     }
 
-    private static TableResult[] Prove(
-        (int File, DeclaredTable Table)[] tables, VerificationProgress progress, CancellationToken cancellation)
+    /// <summary>Proves tables; the results are in the order of the tables.</summary>
+    /// <exception cref="OperationCanceledException">The token was cancelled.</exception>
+    public static TableResult[] Prove(IReadOnlyList<DeclaredTable> tables, VerificationProgress progress, CancellationToken cancellation)
     {
         TableVerifier verifier = new();
-        TableResult[] results = new TableResult[tables.Length];
-        progress.BeginProving([.. tables.Select(table => table.Table.Size)]);
+        TableResult[] results = new TableResult[tables.Count];
+        progress.BeginProving([.. tables.Select(table => table.Size)]);
 
         // The largest first, so that no core is left with one of them at the end.
-        IEnumerable<int> order = Enumerable.Range(0, tables.Length).OrderByDescending(index => tables[index].Table.Size);
+        IEnumerable<int> order = Enumerable.Range(0, tables.Count).OrderByDescending(index => tables[index].Size);
         InParallel(order, index =>
         {
-            results[index] = verifier.Verify(tables[index].Table, progress.OfTable(index), cancellation);
+            results[index] = verifier.Verify(tables[index], progress.OfTable(index), cancellation);
             progress.EndTable(index);
         }, cancellation);
         return results;
     }
 
-    private static ReadFile Read(SearchedFile file, CancellationToken cancellation)
+    private static FileResult Read(SearchedFile file, CancellationToken cancellation)
     {
         if (file.Error is not null)
         {
-            return new ReadFile(null, file.Error);
+            return new FileResult(file.Path, file.IsNamed, null, file.Error, []);
         }
 
         try
         {
             using AssemblyImage image = AssemblyImage.Open(file.Path, cancellation);
-            return new ReadFile(AssemblyReader.Read(image, cancellation), null);
+            return new FileResult(file.Path, file.IsNamed, AssemblyReader.Read(image, cancellation), null, []);
         }
         catch (UnreadableException error)
         {
-            return new ReadFile(null, error);
+            return new FileResult(file.Path, file.IsNamed, null, error, []);
         }
     }
 
@@ -88,6 +94,4 @@ internal static class Verifier
             throw new OperationCanceledException("The verification was interrupted.", error, cancellation);
         }
     }
-
-    private readonly record struct ReadFile(FoundAssembly? Assembly, UnreadableException? Error);
 }

@@ -88,6 +88,9 @@ internal static class FixtureCompiler
         return result.Success ? image.ToArray() : throw new InvalidOperationException(string.Join('\n', result.Diagnostics));
     }
 
+    /// <summary>The runtime library as an image that can be loaded.</summary>
+    public static byte[] OwnLibraryImage() => Emit(CreateCompilation(Framework.Net8, OptimizationLevel.Release, "GaussGen", LibrarySources.Value, []));
+
     /// <summary>The runtime library, compiled for the framework from its own sources.</summary>
     public static MetadataReference OwnLibrary(Framework framework) => Library(framework, "GaussGen", LibrarySources.Value);
 
