@@ -24,6 +24,8 @@ public sealed class PackageContentTests(PackedLibrary package)
             "GaussGen.nuspec",
             "README.md",
             "analyzers/dotnet/cs/GaussGen.Generator.dll",
+            "build/GaussGen.targets",
+            "buildTransitive/GaussGen.targets",
             "lib/net10.0/GaussGen.dll",
             "lib/net10.0/GaussGen.xml",
             "lib/net8.0/GaussGen.dll",

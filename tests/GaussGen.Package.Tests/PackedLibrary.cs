@@ -51,6 +51,13 @@ public sealed class PackedLibrary : IDisposable
         return output;
     }
 
+    /// <summary>Packs the tool too and puts it beside the package, with the same version.</summary>
+    public void PackTool()
+    {
+        string sources = Path.Combine(_root.FullName, "packed", "sources");
+        Command.Dotnet(sources, NoVariables, "pack", "src/GaussGen.Tool", "--output", Feed, $"-p:Version={Version}").RequireSuccess();
+    }
+
     /// <summary>An empty folder outside the repository.</summary>
     public string NewFolder(string name) => _root.CreateSubdirectory(name).FullName;
 
