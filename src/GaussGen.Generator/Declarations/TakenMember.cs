@@ -38,7 +38,10 @@ internal readonly record struct TakenMember(TakenName Name, ISymbol Holder)
             yield return new TakenMember(new TakenName(type.Name, null), type);
         }
 
-        foreach (TakenMember own in MembersOf(type, shape).Where(own => !IsGenerated(own.Holder)))
+        foreach (TakenMember own in MembersOf(type, shape)
+            .GroupBy(own => own.Holder.DeclaringSyntaxReferences.FirstOrDefault()?.SyntaxTree)
+            .Where(file => !IsGenerated(file.First().Holder))
+            .SelectMany(file => file))
         {
             yield return own;
         }
@@ -79,6 +82,7 @@ internal readonly record struct TakenMember(TakenName Name, ISymbol Holder)
         }
     }
 
+    /// <summary>Whether a member is one of those that are generated here; they are in files of their own.</summary>
     private static bool IsGenerated(ISymbol member) => member.GetAttributes().Any(attribute =>
         attribute.AttributeClass?.Name == "GeneratedCodeAttribute"
         && attribute.ConstructorArguments.Length > 0

@@ -52,8 +52,8 @@ public sealed partial class TextTests
     {
         foreach (string text in TextsOf(attribute).Where(text => !text.Contains("stand-in", StringComparison.Ordinal)))
         {
-            Assert.NotEmpty(MembersOf(text));
-            Assert.All(MembersOf(text), member =>
+            Assert.NotEmpty(GeneratedText.MembersOf(text));
+            Assert.All(GeneratedText.MembersOf(text), member =>
             {
                 Assert.Contains("global::System.CodeDom.Compiler.GeneratedCode(\"GaussGen\", \"", member.AttributeLists.ToString(), StringComparison.Ordinal);
                 if (member.Modifiers.Any(SyntaxKind.PublicKeyword))
@@ -117,14 +117,6 @@ public sealed partial class TextTests
         yield return consumer.Run().Text;
         yield return (consumer with { Framework = Framework.NetStandard20 }).Run().Text;
     }
-
-    private static SyntaxList<MemberDeclarationSyntax> MembersOf(string text) => CSharpSyntaxTree
-        .ParseText(text, new CSharpParseOptions(documentationMode: DocumentationMode.Diagnose))
-        .GetRoot()
-        .DescendantNodes()
-        .OfType<ClassDeclarationSyntax>()
-        .Single()
-        .Members;
 
     /// <summary>The value of a hexadecimal floating-point number (C99, 6.4.4.2) with at most 53 significant bits.</summary>
     private static double ValueOf(string text)

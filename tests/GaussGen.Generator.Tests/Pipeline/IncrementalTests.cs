@@ -2,6 +2,7 @@ using System;
 using System.Collections.Generic;
 using System.Linq;
 using System.Runtime.CompilerServices;
+using GaussGen.Generator.Declarations;
 using GaussGen.Generator.Tests.Support;
 using GaussGen.Mathematics.Requests;
 using Microsoft.CodeAnalysis;
@@ -127,7 +128,7 @@ public sealed class IncrementalTests
 
         IReadOnlyCollection<object> reachable = ObjectGraph.ReachableFrom(values);
 
-        Assert.Contains(reachable, item => item is Declarations.TypeHeader);
+        Assert.Contains(reachable, item => item is TypeHeader);
         Assert.DoesNotContain(reachable, IsOfACompilation);
     }
 

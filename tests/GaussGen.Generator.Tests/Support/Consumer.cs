@@ -1,4 +1,5 @@
 using System;
+using System.Collections.Concurrent;
 using System.Collections.Generic;
 using System.Collections.Immutable;
 using System.IO;
@@ -44,7 +45,7 @@ public sealed record Consumer(params string[] Sources)
             nullableContextOptions: LanguageVersion.MapSpecifiedToEffectiveVersion() >= LanguageVersion.CSharp8
                 ? Nullable
                 : NullableContextOptions.Disable))
-        .AddSyntaxTrees(Sources.Select((text, index) => Parse(text, $"Source{index}.cs")));
+        .AddSyntaxTrees(Sources.Select((text, index) => Parse(text, $"Source{index}.cs")).ToArray());
 
     public SyntaxTree Parse(string text, string path) =>
         CSharpSyntaxTree.ParseText(SourceText.From(text, System.Text.Encoding.UTF8), ParseOptions, path);
@@ -85,6 +86,21 @@ public sealed record Outcome(GeneratorDriverRunResult Result, CSharpCompilation 
     public Task<ImmutableArray<Diagnostic>> AnalyzerDiagnostics(DiagnosticAnalyzer? analyzer = null) => Compilation
         .WithAnalyzers([analyzer ?? new DeclarationAnalyzer()])
         .GetAnalyzerDiagnosticsAsync(CancellationToken.None);
+
+    /// <summary>The same; an exception that the analyzer throws is thrown.</summary>
+    public async Task<ImmutableArray<Diagnostic>> AnalyzerDiagnosticsOrThrow()
+    {
+        ConcurrentQueue<Exception> exceptions = new();
+        CompilationWithAnalyzersOptions options = new(
+            new AnalyzerOptions([]),
+            onAnalyzerException: (exception, _, _) => exceptions.Enqueue(exception),
+            concurrentAnalysis: true,
+            logAnalyzerExecutionTime: false);
+        ImmutableArray<Diagnostic> diagnostics = await Compilation
+            .WithAnalyzers([new DeclarationAnalyzer()], options)
+            .GetAnalyzerDiagnosticsAsync(CancellationToken.None);
+        return exceptions.IsEmpty ? diagnostics : throw new AggregateException(exceptions);
+    }
 
     /// <summary>The compiled assembly.</summary>
     public byte[] Emit()
