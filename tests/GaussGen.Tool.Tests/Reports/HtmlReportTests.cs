@@ -52,6 +52,22 @@ public sealed class HtmlReportTests : IDisposable
     }
 
     [Fact]
+    public async Task Each_table_has_the_digest_that_a_baseline_pins()
+    {
+        XElement report = await ReportAsync(0, ("Boat.dll", FixtureCompiler.Generate(Sources.Small)));
+        string baseline = _folder.Below("gaussgen.baseline");
+        Assert.Equal(0, (await CommandLine.RunAsync("baseline", "write", _folder.Below("Boat.dll"), "--file", baseline)).ExitCode);
+        string[] pinned = [.. (await File.ReadAllLinesAsync(baseline)).Skip(1).Select(line => line.Split(" | ")[5]).Order(StringComparer.Ordinal)];
+        string[] shown =
+        [
+            .. Section(report, "details").Descendants("dt").Where(term => term.Value == "Digest")
+                .Select(term => term.ElementsAfterSelf("dd").First().Value).Order(StringComparer.Ordinal),
+        ];
+        Assert.Equal(14, shown.Length);
+        Assert.Equal(pinned, shown);
+    }
+
+    [Fact]
     public async Task Every_link_and_label_leads_somewhere_and_no_identity_is_used_twice()
     {
         XElement report = await ReportAsync(1, ("Boat.dll", FixtureCompiler.Generate(Sources.Small)), ("Wrong.dll", FixtureCompiler.Compile(Wrong)));

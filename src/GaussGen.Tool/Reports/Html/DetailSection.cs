@@ -56,6 +56,11 @@ internal static class DetailSection
     {
         yield return ("Verdict", $"{OutcomeText.Of(table.Verdict)}, {table.Proven} of {Counted.Of(table.Entries, "entry", "entries")}");
         yield return ("Declared by", $"[{table.Attribute}]");
+        if (table.Digest is { } digest)
+        {
+            yield return ("Digest", digest);
+        }
+
         if (table.Proof is not { } proof)
         {
             yield break;

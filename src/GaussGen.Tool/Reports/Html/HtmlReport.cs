@@ -114,7 +114,8 @@ internal sealed class HtmlReport : IReportWriter
     {
         markup.Begin("section", ("id", "versions"), ("aria-labelledby", "versions-title"));
         markup.Line("h2", "Versions and digests", ("id", "versions-title"));
-        markup.Line("p", $"Written by {ToolIdentity.Name} {ToolIdentity.Version}. Digests are SHA-256 over the whole file.");
+        markup.Line("p", $"Written by {ToolIdentity.Name} {ToolIdentity.Version}. Digests here are SHA-256 over the whole file; "
+            + "the digest of each table's data, the one that a baseline pins, is beside its plots.");
         markup.Begin("div", ("class", "scroll"), ("tabindex", "0"), ("role", "region"), ("aria-label", "Files that were read"));
         markup.Begin("table");
         Rows.Head(markup, "Assembly", "Version", "File", "SHA-256");
