@@ -7,4 +7,10 @@ if (args is ["construction"])
     return;
 }
 
+if (args is ["accuracy"])
+{
+    AccuracyComparison.Run();
+    return;
+}
+
 BenchmarkSwitcher.FromAssembly(typeof(ConstructionBenchmarks).Assembly).Run(args);

@@ -31,7 +31,10 @@ internal sealed class MarkupWriter : IDisposable
     {
         XmlWriterSettings settings = new()
         {
-            Encoding = new UTF8Encoding(false), NewLineChars = "\n", OmitXmlDeclaration = true, CloseOutput = false,
+            Encoding = new UTF8Encoding(false),
+            NewLineChars = "\n",
+            OmitXmlDeclaration = true,
+            CloseOutput = false,
         };
         _xml = XmlWriter.Create(stream, settings);
         _xml.WriteDocType("html", null, null, null);
