@@ -1,5 +1,6 @@
 using System;
 using System.Collections.Immutable;
+using System.Linq;
 using System.Threading;
 using GaussGen.Generator.Declarations;
 using GaussGen.Generator.Emission;
@@ -35,6 +36,11 @@ public sealed class DeclarationAnalyzer : DiagnosticAnalyzer
 
     private void Start(CompilationStartAnalysisContext context)
     {
+        if (_families.All(family => context.Compilation.GetTypesByMetadataName(family.AttributeName).IsEmpty))
+        {
+            return;
+        }
+
         TargetCapabilities target = TargetCapabilities.Of(context.Compilation, context.CancellationToken);
         if (target.HasLanguage)
         {
