@@ -13,8 +13,6 @@ namespace GaussGen.Tool;
 /// <summary>The command line: its verbs, and what becomes of what goes wrong.</summary>
 internal static class Application
 {
-    private const string BaselineVerb = "baseline";
-
     /// <summary>Runs one command line and returns the exit code.</summary>
     public static async Task<int> RunAsync(IReadOnlyList<string> arguments, Terminal terminal, CancellationToken cancellation)
     {
@@ -28,45 +26,12 @@ internal static class Application
                 .UseStrictParsing()
                 .PropagateExceptions();
             configuration.Settings.HelpProviderStyles = HelpStyle.Create();
-            _ = configuration.AddCommand<VerifyCommand>("verify")
-                .WithDescription(
-                    "Prove every table of compiled assemblies, without running them. "
-                    + "The exit code is 0 if all is proven, 1 if something is wrong or could not be proven, "
-                    + "2 if something could not be read, no table was found, or the command line is wrong.")
-                .WithExample("verify", "bin/Release/net8.0/SurveyBoat.dll")
-                .WithExample("verify", "bin/Release", "--sarif", "proofs.sarif", "--junit", "proofs.xml")
-                .WithExample("verify", "bin/Release", "--report", "proofs.html")
-                .WithData(terminal);
-            _ = configuration.AddBranch(BaselineVerb, branch =>
-            {
-                branch.SetDescription("Pin the tables that were reviewed in a small text file, and notice when they drift.");
-                branch.AddExample(BaselineVerb, "write", "bin/Release", "--file", "gaussgen.baseline");
-                branch.AddExample(BaselineVerb, "check", "bin/Release", "--file", "gaussgen.baseline");
-                _ = branch.AddCommand<BaselineWriteCommand>("write")
-                    .WithDescription("Write down every table: its identity, its claim and the digest of its data.")
-                    .WithExample(BaselineVerb, "write", "bin/Release/net8.0/SurveyBoat.dll")
-                    .WithData(terminal);
-                _ = branch.AddCommand<BaselineCheckCommand>("check")
-                    .WithDescription("Say which tables were added, removed or changed since; end with 1 if any was.")
-                    .WithExample(BaselineVerb, "check", "bin/Release/net8.0/SurveyBoat.dll")
-                    .WithData(terminal);
-            });
-            _ = configuration.AddCommand<ExportCommand>("export")
-                .WithDescription("Write proven tables for other programs: as a C header, CSV or JSON.")
-                .WithExample("export", "SurveyBoat.dll", "SurveyBoat.Sixteen", "--output", "sixteen.h", "--prefix", "boat_")
-                .WithExample("export", "SurveyBoat.dll", "--as", "csv")
-                .WithExample("export", "--rule", "gauss-hermite", "--points", "16", "--format", "binary32")
-                .WithExample("export", "--moments", "normal", "--mean", "1.5", "--standard-deviation", "0.25", "--as", "json")
-                .WithData(terminal);
-            _ = configuration.AddCommand<ExplainCommand>("explain")
-                .WithDescription("Show a reviewer one table on a page: definition, entries, residuals, plot, proof.")
-                .WithExample("explain", "SurveyBoat.dll", "SurveyBoat.Sixteen")
-                .WithData(terminal);
+            Verbs.Add(configuration, terminal);
         });
 
         try
         {
-            if (arguments is [] or [BaselineVerb])
+            if (arguments is [] or [Verbs.Baseline])
             {
                 _ = await application.RunAsync([.. arguments, "--help"], cancellation).ConfigureAwait(false);
                 return ExitCode.NotRead;

@@ -40,6 +40,9 @@ internal static class ClaimTable
         new("NormalMoments", Moments, false, read => new NormalMomentsClaim(read.Next<double>(), read.Next<double>(), read.Named("MaximumOrder", 4), read.Format())),
     }.ToFrozenDictionary(family => family.Attribute, StringComparer.Ordinal);
 
+    /// <summary>The attributes of all families.</summary>
+    public static IEnumerable<string> Attributes => Families.Keys;
+
     /// <summary>The family that a declaration belongs to, or null if this version of the tool does not know it.</summary>
     public static ClaimFamily? Find(string attribute) => Families.GetValueOrDefault(attribute);
 

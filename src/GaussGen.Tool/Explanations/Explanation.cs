@@ -8,14 +8,12 @@ namespace GaussGen.Tool.Explanations;
 /// <param name="Definition">What the table is, one formula or sentence each.</param>
 /// <param name="Exactness">What a rule integrates exactly, and how far it is off otherwise; empty for other tables.</param>
 /// <param name="Members">What each member is, by its name.</param>
-/// <param name="Method">How an entry is proven.</param>
 /// <param name="Caution">What the proof says nothing about.</param>
 /// <param name="Sources">Where the formulas come from.</param>
 internal sealed record Explanation(
     IReadOnlyList<string> Definition,
     IReadOnlyList<string> Exactness,
     IReadOnlyDictionary<string, string> Members,
-    string Method,
     string Caution,
     string Sources)
 {

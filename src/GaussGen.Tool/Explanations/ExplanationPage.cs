@@ -45,9 +45,9 @@ internal sealed record ExplanationPage(TableResult Result, FoundAssembly Assembl
             .. Labelled("Definition", explanation.Definition),
             .. Labelled("Exactness", explanation.Exactness),
             .. Labelled("Format", [FormatText(proof.Claim.Format)]),
-            .. Labelled("Digest", [Result.Digest!]),
+            .. Labelled("SHA-256", [TableDigest.Digits(Result.Digest!)]),
             .. Verdicts(proof),
-            .. Labelled("Proof", [explanation.Method]),
+            .. Labelled("Proof", [proof.Claim.Method]),
             .. Labelled("Sources", [explanation.Sources + "."]),
             .. Labelled("Caution", [explanation.Caution]),
             new(""),
@@ -102,7 +102,7 @@ internal sealed record ExplanationPage(TableResult Result, FoundAssembly Assembl
         }
 
         yield return new PageLine("");
-        yield return new PageLine("Moment equations Σ wᵢ xᵢᵏ = ∫ xᵏ w(x) dx; those of odd k hold by symmetry", Heading);
+        yield return new PageLine("Moment equations Σ wᵢ xᵢᵏ = ∫ xᵏ w(x) dx; odd k hold by symmetry", Heading);
         yield return new PageLine("   k   relative residual at most   allowed by rounding");
         foreach (MomentEquation equation in proof.MomentEquations)
         {

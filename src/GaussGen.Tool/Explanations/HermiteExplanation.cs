@@ -31,7 +31,7 @@ internal static class HermiteExplanation
             [
                 "Σ wᵢ f(xᵢ) ≈ ∫ f(x) w(x) dx over the real line,",
                 isDensity ? "w(x) = exp(−x²/2)/√(2π), the standard normal density (probabilists' convention)." : "w(x) = exp(−x²) (physicists' convention).",
-                $"The nodes xᵢ are the zeros of the Hermite polynomial {polynomial}: n = {count},",
+                $"The n = {count} nodes xᵢ are the zeros of the Hermite polynomial {polynomial},",
                 isDensity ? "He₀ = 1, He₁ = x, Heₖ₊₁ = x Heₖ − k Heₖ₋₁." : "H₀ = 1, H₁ = 2x, Hₖ₊₁ = 2x Hₖ − 2k Hₖ₋₁.",
                 isDensity ? "The weights are wᵢ = n!/(n Heₙ₋₁(xᵢ))²." : "The weights are wᵢ = 2ⁿ⁻¹ n! √π/(n Hₙ₋₁(xᵢ))².",
                 "For a normal variable X with mean m and standard deviation s:",
@@ -42,8 +42,6 @@ internal static class HermiteExplanation
                 isDensity ? "otherwise off by n!/(2n)! f⁽²ⁿ⁾(ξ) for some ξ." : "otherwise off by n! √π/(2ⁿ (2n)!) f⁽²ⁿ⁾(ξ) for some ξ.",
             ],
             Members,
-            $"Node: exact counts of the zeros of {polynomial} beyond the two numbers half-way to the next {claim.Format.Name} numbers show that "
-                + "one zero lies between them. Weight: an enclosure of its formula at that zero lies between the half-way numbers.",
             "That the constants are right says nothing about an integrand that is no such polynomial; compare with a rule of more points "
                 + "before a result matters.",
             "NIST DLMF 3.5(v), 18.9; Szegő, Orthogonal Polynomials (1939), 3.4");

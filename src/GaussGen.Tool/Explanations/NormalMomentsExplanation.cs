@@ -27,8 +27,6 @@ internal static class NormalMomentsExplanation
         ],
         [],
         Members,
-        "Each entry from its own formula and from no other entry: in exact fractions, and for the absolute moments of odd order in an "
-            + $"enclosure that lies between the numbers half-way to the next {claim.Format.Name} numbers.",
         "That the constants are right says nothing about how well the distribution describes what was measured.",
         "Winkelbauer, Moments and absolute moments of the normal distribution (2012); NIST DLMF 5.4, 5.5");
 

@@ -41,7 +41,7 @@ internal sealed record TerminalStemPlot(IReadOnlyList<(double X, double Y)> Poin
         for (int row = Height - 1; row >= 0; row--)
         {
             bool isLabelled = row == Height - 1 || row == 0 || row == Height / 2;
-            string label = isLabelled ? Label(bottom + ((top - bottom) * row / (Height - 1))) : "";
+            string label = isLabelled ? Label(bottom + ((top - bottom) * (row / (Height - 1.0)))) : "";
             string stems = string.Concat(heads.Select(head => head == row ? letters.Head : head > row ? letters.Stem : ' '));
             lines.Add($"{label.PadLeft(LabelWidth)} {(isLabelled ? letters.Tick : letters.Side)}{stems}".TrimEnd());
         }
@@ -57,7 +57,8 @@ internal sealed record TerminalStemPlot(IReadOnlyList<(double X, double Y)> Poin
         int?[] heads = new int?[columns];
         foreach ((double x, double y) in Points)
         {
-            int column = right > left ? (int)Math.Round((x - left) / (right - left) * (columns - 1)) : columns / 2;
+            // Halves, for the width between two numbers may be no number any more.
+            int column = right > left ? (int)Math.Round(((x / 2) - (left / 2)) / ((right / 2) - (left / 2)) * (columns - 1)) : columns / 2;
             int row = !IsShown(y) ? -1 : top > bottom ? (int)Math.Round((Scale(y) - bottom) / (top - bottom) * (Height - 1)) : Height - 1;
             heads[column] = Math.Max(heads[column] ?? -1, row);
         }

@@ -93,6 +93,7 @@ internal sealed class JsonReport : IReportWriter
         }
 
         json.WriteString("verdict", VerdictText.Of(table.Verdict));
+        WriteIfKnown(json, "digest", table.Digest);
         json.WriteStartArray("findings");
         foreach (Finding finding in table.Findings)
         {

@@ -45,6 +45,9 @@ internal static class TableDigest
         && text.StartsWith(Algorithm, StringComparison.Ordinal)
         && text.Skip(Algorithm.Length).All(char.IsAsciiHexDigitLower);
 
+    /// <summary>The digits of a digest.</summary>
+    public static string Digits(string digest) => digest[Algorithm.Length..];
+
     /// <summary>The beginning of a digest, which is enough to tell two from each other by eye.</summary>
     public static string Short(string digest) => digest[..(Algorithm.Length + 12)] + "…";
 

@@ -205,6 +205,12 @@ public sealed class ExportTests : IDisposable
         await interruption.CancelAsync();
         Assert.Equal(130, (await CommandLine.RunAsync(interruption.Token, "export", path, "-o", _folder.Below("t.h"))).ExitCode);
         Assert.Equal(130, (await CommandLine.RunAsync(interruption.Token, "export", "--rule", "gauss-hermite", "--points", "500", "-o", _folder.Below("t.h"))).ExitCode);
+
+        // In the middle of the work: the largest rule takes seconds.
+        using CancellationTokenSource later = new();
+        Task<Run> run = CommandLine.RunAsync(later.Token, "export", "--rule", "gauss-hermite", "--points", "1000", "-o", _folder.Below("t.h"));
+        later.CancelAfter(TimeSpan.FromMilliseconds(300));
+        Assert.Equal(new Run(130, "", "gaussgen: error: interrupted\n"), await run);
         Assert.Equal([path], Directory.GetFiles(_folder.Path));
     }
 
