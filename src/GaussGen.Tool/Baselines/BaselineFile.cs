@@ -31,9 +31,10 @@ internal static class BaselineFile
                 return null;
             }
 
-            return file.Length <= MaximumLength
-                ? Baseline.Parse(File.ReadAllBytes(path), path)
-                : throw new InputException($"{path} is too large for a baseline; name another file with --file");
+            // Pipes and devices have no length either, and may have no end.
+            return file.Length == 0 ? throw new InputException($"{path} is empty, or no regular file; name another file with --file, or delete this one and write it again")
+                : file.Length > MaximumLength ? throw new InputException($"{path} is too large for a baseline; name another file with --file")
+                : Baseline.Parse(File.ReadAllBytes(path), path);
         }
         catch (Exception error) when (error is IOException or UnauthorizedAccessException or ArgumentException or NotSupportedException)
         {

@@ -14,7 +14,7 @@ namespace GaussGen.Tool.Explanations;
 /// </remarks>
 internal sealed class EntryTable
 {
-    private const int ShownRows = 8;
+    private const int ShownRows = 6;
     private const int IndexWidth = 4;
     private const int ColumnWidth = 25;
 

@@ -79,7 +79,7 @@ internal sealed class CHeaderWriter(string? prefix) : ITableWriter
             writer,
             [
                 $"{table.Claim.Title}, {table.Claim.Format.Name}.",
-                table.AssemblyName is null ? "" : $"Table {Harmless(table.Name)} of {Harmless(table.AssemblyName)} {table.AssemblyVersion}.",
+                table.AssemblyName is null ? "" : $"Table {Harmless(table.Name)} of {Harmless(table.AssemblyName)}.",
                 ProofText(table),
                 "Data: " + table.Digest,
                 "",

@@ -22,6 +22,14 @@ internal static class WholeFile
         try
         {
             string target = Path.GetFullPath(path);
+            if (IsDevice(target))
+            {
+                // A device cannot be half written, and must not be replaced by a file.
+                using FileStream device = new(target, FileMode.Open, FileAccess.Write, FileShare.ReadWrite);
+                write(device);
+                return;
+            }
+
             temporary = Path.Combine(Path.GetDirectoryName(target)!, $".{Path.GetFileName(target)}.{Guid.NewGuid():N}.part");
             using (FileStream stream = new(temporary, FileMode.CreateNew, FileAccess.Write, FileShare.None))
             {
@@ -40,6 +48,10 @@ internal static class WholeFile
             Remove(temporary);
         }
     }
+
+    /// <summary>Whether a full path is that of a device, such as /dev/null or /dev/stdout.</summary>
+    public static bool IsDevice(string target) =>
+        !OperatingSystem.IsWindows() && (Path.GetDirectoryName(target) is "/dev" or "/dev/fd") && File.Exists(target);
 
     private static void Remove(string temporary)
     {

@@ -23,7 +23,6 @@ public sealed class BaselineFormatTests : IDisposable
     private string File => _folder.Below("gaussgen.baseline");
 
     [Theory]
-    [InlineData("", 1, "does not begin a baseline")]
     [InlineData("# Notes\n", 1, "does not begin a baseline")]
     [InlineData("# gaussgen baseline one\n", 1, "does not begin a baseline")]
     [InlineData("# gaussgen baseline 2: more\n", 1, "says format 2 and this version of the tool knows 1")]
@@ -55,6 +54,19 @@ public sealed class BaselineFormatTests : IDisposable
         Run run = await CommandLine.RunAsync("baseline", "check", _folder.Add("Boat.dll", Boat), "--file", File);
         Assert.Equal(2, run.ExitCode);
         Assert.Contains("(3): the line is not UTF-8 text", run.Messages, StringComparison.Ordinal);
+    }
+
+    [Fact]
+    public async Task An_empty_file_is_an_error_and_kept()
+    {
+        _ = _folder.Add("gaussgen.baseline", []);
+        foreach (string verb in new[] { "check", "write" })
+        {
+            Run run = await CommandLine.RunAsync("baseline", verb, _folder.Add("Boat.dll", Boat), "--file", File);
+            Assert.Equal(2, run.ExitCode);
+            Assert.Contains(" is empty, or no regular file", Assert.Single(run.Messages.TrimEnd().Split('\n')), StringComparison.Ordinal);
+            Assert.Empty(await System.IO.File.ReadAllBytesAsync(File));
+        }
     }
 
     [Fact]

@@ -64,7 +64,7 @@ public sealed class ExplainTests : IDisposable
     }
 
     [Fact]
-    public async Task Every_table_fits_on_a_page_of_80_columns_in_ASCII_too()
+    public async Task Every_table_fits_on_a_page_of_80_columns()
     {
         string path = _folder.Add("Boat.dll", FixtureCompiler.Generate(Sources.Small + Sources.Large.Replace("using GaussGen;", "", StringComparison.Ordinal)));
         string[] types = ["One", "Two", "Four", "Seven", "Nothing", "Drift", "SixtyFour", "SixtyThree", "Dropped"];
@@ -74,8 +74,6 @@ public sealed class ExplainTests : IDisposable
             Assert.Equal((0, ""), (run.ExitCode, run.Messages));
             AssertFits(run.Results);
             Assert.InRange(run.Results.Split('\n').Length, 30, 75);
-            string ascii = AsciiText.Of(run.Results.Replace('\n', '\u0001')).Replace('_', ' ');
-            Assert.All(ascii, letter => Assert.InRange(letter, ' ', '~'));
         }
     }
 
@@ -107,8 +105,8 @@ public sealed class ExplainTests : IDisposable
     {
         string path = _folder.Add("Boat.dll", FixtureCompiler.Generate(Sources.Large));
         Run cut = await CommandLine.RunAsync("explain", path, "SixtyFour");
-        Assert.Contains("\n     … 24 more; --all shows them\n", cut.Results, StringComparison.Ordinal);
-        Assert.Equal(["32", "33", "34", "35", "60", "61", "62", "63"], Indices(cut.Results));
+        Assert.Contains("\n     … 26 more; --all shows them\n", cut.Results, StringComparison.Ordinal);
+        Assert.Equal(["32", "33", "34", "61", "62", "63"], Indices(cut.Results));
         Run all = await CommandLine.RunAsync("explain", path, "SixtyFour", "--all");
         Assert.DoesNotContain("more", all.Results.Split("Moment equations")[0].Split("Nodes  ")[1], StringComparison.Ordinal);
         Assert.Equal(Enumerable.Range(0, 64).Select(index => $"{index}"), Indices(all.Results));

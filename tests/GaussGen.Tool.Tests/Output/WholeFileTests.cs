@@ -46,6 +46,20 @@ public sealed class WholeFileTests : IDisposable
     }
 
     [Fact]
+    public void A_device_is_not_replaced_by_a_file()
+    {
+        string path = _folder.Add("out.txt", [1]);
+        Assert.False(WholeFile.IsDevice(path));
+        Assert.False(WholeFile.IsDevice("/dev/no such device"));
+        if (!OperatingSystem.IsWindows())
+        {
+            Assert.True(WholeFile.IsDevice("/dev/null"));
+            WholeFile.Write("/dev/null", stream => stream.WriteByte(1), CancellationToken.None);
+            Assert.Empty(File.ReadAllBytes("/dev/null"));
+        }
+    }
+
+    [Fact]
     public void A_folder_in_the_place_of_the_file_is_an_error() =>
         Assert.Throws<UnwritableException>(() => WholeFile.Write(_folder.Path, stream => stream.WriteByte(1), CancellationToken.None));
 
