@@ -22,4 +22,8 @@ public sealed record RoundedRule(
     int ZeroWeights,
     RoundedValue? FirstZeroWeightNode,
     RoundedValue? NodeScale,
-    RoundedValue? ReciprocalTotalWeight);
+    RoundedValue? ReciprocalTotalWeight)
+{
+    /// <summary>The rounded values of <see cref="RuleTable.Constants"/>, in their order.</summary>
+    public IReadOnlyList<RoundedValue> Constants { get; init; } = [];
+}

@@ -1,4 +1,6 @@
+using System;
 using System.Collections.Generic;
+using System.Linq;
 using System.Threading;
 using GaussGen.Mathematics.Arithmetic;
 using GaussGen.Mathematics.Formats;
@@ -16,13 +18,15 @@ public static class RuleRounding
     /// <param name="format">The number format.</param>
     /// <param name="dropZeroWeights">Whether nodes whose weight rounds to zero are left out.</param>
     /// <param name="cancellation">Looked at before each entry, and passed on.</param>
-    /// <exception cref="System.InvalidOperationException">No enclosure decides an entry; see <see cref="Rounding.Nearest"/>.</exception>
-    /// <exception cref="System.OperationCanceledException">The token was cancelled.</exception>
+    /// <exception cref="RuleConstructionException">A node is too large for the format, or an entry's rounding stays open.</exception>
+    /// <exception cref="InvalidOperationException">No enclosure decides an entry; see <see cref="Rounding.Nearest"/>.</exception>
+    /// <exception cref="OperationCanceledException">The token was cancelled.</exception>
     public static RoundedRule Round(
         RuleTable table, BinaryFormat format, bool dropZeroWeights, CancellationToken cancellation)
     {
         RoundedValue[] weights = RoundAll(table.Weights, table.IsSymmetric, negated: false, format, cancellation);
         RoundedValue[] nodes = RoundAll(table.Nodes, table.IsSymmetric, negated: true, format, cancellation);
+        RequireFinite(nodes, format);
         int zeroWeights = CountZeros(nodes, weights, format, out RoundedValue? first);
         if (dropZeroWeights && zeroWeights > 0)
         {
@@ -38,7 +42,20 @@ public static class RuleRounding
             zeroWeights,
             first,
             family is null ? null : Rounding.Nearest(family.NodeScale, format, cancellation),
-            family is null ? null : Rounding.Nearest(Reciprocal(family.TotalWeight), format, cancellation));
+            family is null ? null : Rounding.Nearest(Reciprocal(family.TotalWeight), format, cancellation))
+        {
+            Constants = [.. table.Constants.Select(constant => Rounding.Nearest(constant.Value, format, cancellation))],
+        };
+    }
+
+    private static void RequireFinite(RoundedValue[] nodes, BinaryFormat format)
+    {
+        if (Array.Exists(nodes, node => format.IsInfinity(node.Bits)))
+        {
+            throw new RuleConstructionException(
+                RuleFailure.NodeNotRepresentable,
+                "A node of the rule is too large for " + format.Name + "; ask for fewer points, or for a weight of a smaller extent.");
+        }
     }
 
     private static RoundedValue[] RoundAll(

@@ -17,7 +17,20 @@ public sealed record RuleDescription(string Title, string Weight, string Nodes, 
 /// </summary>
 /// <param name="NodeScale">What a node is multiplied by besides the standard deviation: 1, or √2.</param>
 /// <param name="TotalWeight">The sum of the weights, ∫ of the weight function: 1, or √π; the factor is its reciprocal.</param>
-public sealed record LocationScale(RealNumber NodeScale, RealNumber TotalWeight);
+public sealed record LocationScale(RealNumber NodeScale, RealNumber TotalWeight)
+{
+    /// <summary>
+    /// Whether the family has a location: E f = factor · Σ wᵢ f(mean + …). Without one it has a scale only, as the half-normal
+    /// distributions do: E f = factor · Σ wᵢ f(scale · xᵢ).
+    /// </summary>
+    public bool HasLocation { get; init; } = true;
+}
+
+/// <summary>A number beside the nodes and weights that a rule's user is given.</summary>
+/// <param name="Name">Its name as a member: "NormalizingIntegral".</param>
+/// <param name="Value">Its value.</param>
+/// <param name="Summary">What it is, as a sentence without markup.</param>
+public sealed record NamedConstant(string Name, RealNumber Value, string Summary);
 
 /// <summary>A rule before a number format is chosen: Σ wᵢ f(xᵢ) ≈ ∫ f(x) w(x) dx.</summary>
 /// <param name="Description">The words for the documentation.</param>
@@ -32,4 +45,8 @@ public sealed record RuleTable(
     IReadOnlyList<RealNumber> Weights,
     int DegreeOfExactness,
     bool IsSymmetric,
-    LocationScale? LocationScale);
+    LocationScale? LocationScale)
+{
+    /// <summary>Numbers beside the nodes and weights that belong to the rule.</summary>
+    public IReadOnlyList<NamedConstant> Constants { get; init; } = [];
+}
