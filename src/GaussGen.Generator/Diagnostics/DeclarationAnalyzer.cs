@@ -4,15 +4,23 @@ using System.Linq;
 using System.Threading;
 using GaussGen.Generator.Declarations;
 using GaussGen.Generator.Emission;
+using GaussGen.Mathematics.Baselines;
 using Microsoft.CodeAnalysis;
 using Microsoft.CodeAnalysis.Diagnostics;
 
 namespace GaussGen.Generator.Diagnostics;
 
-/// <summary>Tells what is wrong with the declarations of tables: each mistake once, at the place where it is to be mended.</summary>
+/// <summary>
+/// Tells what is wrong with the declarations of tables, each mistake once, at the place where it is to be mended; and which tables
+/// are not as a baseline has them.
+/// </summary>
 [DiagnosticAnalyzer(LanguageNames.CSharp)]
 public sealed class DeclarationAnalyzer : DiagnosticAnalyzer
 {
+    // The host remembers what was read of a text for as long as the text is the same.
+    private static readonly SourceTextValueProvider<BaselineText> BaselineReader =
+        new(text => BaselineText.Parse(text.ToString().Split('\n')));
+
     private readonly ImmutableArray<Family> _families;
 
     /// <summary>An analyzer for every family in the declaration table.</summary>
@@ -44,7 +52,12 @@ public sealed class DeclarationAnalyzer : DiagnosticAnalyzer
         TargetCapabilities target = TargetCapabilities.Of(context.Compilation, context.CancellationToken);
         if (target.HasLanguage)
         {
-            context.RegisterSymbolAction(symbol => CheckType(symbol, target), SymbolKind.NamedType);
+            BaselineSet baselines = BaselineSet.Of(
+                context.Options.AdditionalFiles,
+                text => context.TryGetValue(text, BaselineReader, out BaselineText? content) ? content : null,
+                context.CancellationToken);
+            context.RegisterSymbolAction(symbol => CheckType(symbol, target, baselines), SymbolKind.NamedType);
+            context.RegisterAdditionalFileAction(baselines.ReportFlaw);
             return;
         }
 
@@ -52,13 +65,13 @@ public sealed class DeclarationAnalyzer : DiagnosticAnalyzer
         context.RegisterSymbolAction(symbol => LanguageCheck.Report(symbol, first, _families), SymbolKind.NamedType);
     }
 
-    private void CheckType(SymbolAnalysisContext context, TargetCapabilities target)
+    private void CheckType(SymbolAnalysisContext context, TargetCapabilities target, BaselineSet baselines)
     {
         INamedTypeSymbol type = (INamedTypeSymbol)context.Symbol;
         HostCheck.Report(context, type, _families);
         if (type.TypeKind is TypeKind.Class or TypeKind.Struct)
         {
-            TableCheck.Report(context, type, _families, target);
+            TableCheck.Report(context, type, _families, target, baselines);
         }
     }
 }

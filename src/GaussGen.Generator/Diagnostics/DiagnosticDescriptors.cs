@@ -3,7 +3,7 @@ using Microsoft.CodeAnalysis;
 
 namespace GaussGen.Generator.Diagnostics;
 
-/// <summary>What can be wrong with a declaration. Numbers are never given twice; the readme has a section for each.</summary>
+/// <summary>What can be wrong with a declaration or a baseline. Numbers are never given twice; the readme has a section for each.</summary>
 internal static class DiagnosticDescriptors
 {
     public static readonly DiagnosticDescriptor NotPartial = Mistake(
@@ -72,14 +72,11 @@ internal static class DiagnosticDescriptors
         "A moment is too large for the number format",
         "Set MaximumOrder to {0} at most, use a wider format, or measure in a larger unit: the moment of order {1} is too large for {2}");
 
-    public static readonly DiagnosticDescriptor ZeroWeights = new(
+    public static readonly DiagnosticDescriptor ZeroWeights = Warning(
         "GAUSS012",
-        "Weights round to zero",
-        "{0} of the {1} weights round to zero in {2}, those of the nodes of magnitude {3} and more; set DropZeroWeights = true to leave those nodes out, or ask for fewer points",
         Category.Range,
-        DiagnosticSeverity.Warning,
-        isEnabledByDefault: true,
-        helpLinkUri: HelpLink.Of("GAUSS012"));
+        "Weights round to zero",
+        "{0} of the {1} weights round to zero in {2}, those of the nodes of magnitude {3} and more; set DropZeroWeights = true to leave those nodes out, or ask for fewer points");
 
     public static readonly DiagnosticDescriptor LanguageVersion = Mistake(
         "GAUSS013",
@@ -87,12 +84,27 @@ internal static class DiagnosticDescriptors
         "Tables need C# 9 or later",
         "Set LangVersion to 9.0 or later: this project compiles C# {0}, and [{1}] generates code that needs C# 9.0");
 
+    public static readonly DiagnosticDescriptor NotAsReviewed = Warning(
+        "GAUSS014",
+        Category.Baseline,
+        "A table is not as the baseline has it",
+        "Review the table of '{0}' and renew {1} with 'gaussgen baseline write <assembly> --file {1}', or restore the declaration: {2}");
+
+    public static readonly DiagnosticDescriptor NoBaseline = Warning(
+        "GAUSS015",
+        Category.Baseline,
+        "A baseline cannot be read",
+        "Tables are not compared with {1}, for line {0} {2}");
+
     public static ImmutableArray<DiagnosticDescriptor> All { get; } = ImmutableArray.Create(
         NotPartial, Generic, FileLocal, PointsOutOfRange, CollidingTables, NameTaken, NotFinite, NotPositive, OrderOutOfRange, Undefined,
-        MomentOverflow, ZeroWeights, LanguageVersion);
+        MomentOverflow, ZeroWeights, LanguageVersion, NotAsReviewed, NoBaseline);
 
     private static DiagnosticDescriptor Mistake(string id, string category, string title, string message) =>
         new(id, title, message, category, DiagnosticSeverity.Error, isEnabledByDefault: true, helpLinkUri: HelpLink.Of(id));
+
+    private static DiagnosticDescriptor Warning(string id, string category, string title, string message) =>
+        new(id, title, message, category, DiagnosticSeverity.Warning, isEnabledByDefault: true, helpLinkUri: HelpLink.Of(id));
 
     private static class Category
     {
@@ -104,5 +116,8 @@ internal static class DiagnosticDescriptors
 
         /// <summary>What becomes of the numbers.</summary>
         public const string Range = "GaussGen.Range";
+
+        /// <summary>Whether the numbers are those that were reviewed.</summary>
+        public const string Baseline = "GaussGen.Baseline";
     }
 }

@@ -16,12 +16,16 @@ namespace GaussGen.Generator.Diagnostics;
 internal static class TableCheck
 {
     public static void Report(
-        SymbolAnalysisContext context, INamedTypeSymbol type, ImmutableArray<Family> families, TargetCapabilities target)
+        SymbolAnalysisContext context,
+        INamedTypeSymbol type,
+        ImmutableArray<Family> families,
+        TargetCapabilities target,
+        BaselineSet baselines)
     {
         DeclaredFamily[] declared = families.AllOn(type).OrderBy(each => SourceOrder.Of(each.Attribute)).ToArray();
         foreach (DeclaredFamily each in declared)
         {
-            ReportCollision(context, type, each, declared);
+            bool isAlone = !ReportCollision(context, type, each, declared);
             ArgumentReader arguments = new(each.Attribute);
             TableRequest request = each.Family.ReadRequest(arguments);
             if (arguments.IsRefusedByCompiler)
@@ -36,13 +40,18 @@ internal static class TableCheck
 
             if (arguments.Mistakes.Count == 0)
             {
-                ReportRange(context, each, request);
+                bool isInRange = ReportRange(context, each, request);
                 ReportTakenNames(context, type, each, request, families, target);
+                if (isAlone && isInRange)
+                {
+                    BaselineCheck.Report(context, type, each, request, baselines);
+                }
             }
         }
     }
 
-    private static void ReportCollision(
+    /// <summary>Whether another table has the members' names already.</summary>
+    private static bool ReportCollision(
         SymbolAnalysisContext context, INamedTypeSymbol type, DeclaredFamily declared, IReadOnlyList<DeclaredFamily> all)
     {
         DeclaredFamily first = all.First(each => each.Family.Shape == declared.Family.Shape);
@@ -51,10 +60,14 @@ internal static class TableCheck
             Location place = AttributePlace.Of(declared.Attribute, context.CancellationToken);
             context.ReportDiagnostic(Diagnostic.Create(
                 DiagnosticDescriptors.CollidingTables, place, declared.Family.Name, first.Family.Name, DisplayName.Of(type)));
+            return true;
         }
+
+        return false;
     }
 
-    private static void ReportRange(SymbolAnalysisContext context, DeclaredFamily declared, TableRequest request)
+    /// <summary>Whether the format can hold the table; that weights round to zero is no hindrance.</summary>
+    private static bool ReportRange(SymbolAnalysisContext context, DeclaredFamily declared, TableRequest request)
     {
         if (request is RuleRequest { DropZeroWeights: false } ruleRequest)
         {
@@ -77,8 +90,11 @@ internal static class TableCheck
             {
                 Report(context, declared, new Mistake(
                     DiagnosticDescriptors.MomentOverflow, ArgumentReader.MaximumOrderArgument, order - 1, order, moments.Format.Name));
+                return false;
             }
         }
+
+        return true;
     }
 
     private static void ReportTakenNames(

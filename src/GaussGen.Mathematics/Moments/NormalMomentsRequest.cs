@@ -3,6 +3,7 @@ using System.Collections.Generic;
 using System.Globalization;
 using System.Threading;
 using GaussGen.Mathematics.Arithmetic;
+using GaussGen.Mathematics.Baselines;
 using GaussGen.Mathematics.Formats;
 using GaussGen.Mathematics.Requests;
 
@@ -61,6 +62,9 @@ public sealed record NormalMomentsRequest : MomentRequest
 
     /// <summary>The highest order.</summary>
     public int MaximumOrder { get; }
+
+    /// <inheritdoc/>
+    public override string Claim => ClaimTitle.NormalMoments(MaximumOrder, Mean, StandardDeviation);
 
     /// <summary>Whether a number can be a mean: whether it is finite.</summary>
     public static bool IsMean(double value) => !double.IsNaN(value) && !double.IsInfinity(value);

@@ -1,6 +1,7 @@
 using System;
 using System.Globalization;
 using System.Threading;
+using GaussGen.Mathematics.Baselines;
 using GaussGen.Mathematics.Formats;
 
 namespace GaussGen.Mathematics.Proofs;
@@ -61,13 +62,8 @@ public sealed record GaussHermiteClaim : TableClaim
     public bool DropZeroWeights { get; }
 
     /// <inheritdoc/>
-    public override string Title => string.Format(
-        CultureInfo.InvariantCulture,
-        "Gauss–Hermite rule with {0} {1}, {2}{3}",
-        Points,
-        Points == 1 ? "point" : "points",
-        Weight == HermiteWeight.StandardNormalDensity ? "standard normal density" : "weight exp(−x²)",
-        DropZeroWeights ? ", without zero weights" : string.Empty);
+    public override string Title =>
+        ClaimTitle.GaussHermite(Points, Weight == HermiteWeight.ExponentialOfMinusSquare, DropZeroWeights);
 
     /// <inheritdoc/>
     public override string Method =>

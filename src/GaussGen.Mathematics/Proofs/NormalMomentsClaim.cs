@@ -1,6 +1,7 @@
 using System;
 using System.Globalization;
 using System.Threading;
+using GaussGen.Mathematics.Baselines;
 using GaussGen.Mathematics.Formats;
 
 namespace GaussGen.Mathematics.Proofs;
@@ -55,12 +56,7 @@ public sealed record NormalMomentsClaim : TableClaim
     public int MaximumOrder { get; }
 
     /// <inheritdoc/>
-    public override string Title => string.Format(
-        CultureInfo.InvariantCulture,
-        "Moments to order {0} of the normal distribution with mean {1} and standard deviation {2}",
-        MaximumOrder,
-        Write(Mean),
-        Write(StandardDeviation));
+    public override string Title => ClaimTitle.NormalMoments(MaximumOrder, Mean, StandardDeviation);
 
     /// <inheritdoc/>
     public override string Method =>
@@ -73,7 +69,4 @@ public sealed record NormalMomentsClaim : TableClaim
     /// <inheritdoc/>
     public override TableProof Prove(TableData data, IProgress<double>? progress, CancellationToken cancellation) =>
         new NormalMomentsProof(this, data).Run(progress, cancellation);
-
-    private static string Write(double value) =>
-        ShortestDecimal.Write((ulong)BitConverter.DoubleToInt64Bits(value), BinaryFormat.Binary64);
 }

@@ -10,7 +10,14 @@ namespace GaussGen.Mathematics.Requests;
 /// which results are remembered; nothing of the source text that asked for it is in it.
 /// </summary>
 /// <param name="Format">The number format of every entry.</param>
-public abstract record TableRequest(BinaryFormat Format);
+public abstract record TableRequest(BinaryFormat Format)
+{
+    /// <summary>
+    /// What the table promises, in the words of a baseline; the same as the title of the claim that is proven of it. <c>null</c> for a
+    /// family of which nothing is proven in assemblies: no baseline can have its tables.
+    /// </summary>
+    public virtual string? Claim => null;
+}
 
 /// <summary>A request for nodes and weights on the real line.</summary>
 /// <param name="Format">The number format of every entry.</param>

@@ -1,4 +1,5 @@
 using System.Threading;
+using GaussGen.Mathematics.Baselines;
 using GaussGen.Mathematics.Formats;
 using GaussGen.Mathematics.Requests;
 
@@ -14,6 +15,9 @@ namespace GaussGen.Mathematics.Rules;
 public sealed record GaussHermiteRequest(int Points, HermiteConvention Convention, BinaryFormat Format, bool DropZeroWeights)
     : RuleRequest(Format, DropZeroWeights)
 {
+    /// <inheritdoc/>
+    public override string Claim => ClaimTitle.GaussHermite(Points, Convention == HermiteConvention.Physicist, DropZeroWeights);
+
     /// <inheritdoc/>
     /// <exception cref="System.ArgumentOutOfRangeException"><see cref="Points"/> is out of range.</exception>
     public override RuleTable Construct(CancellationToken cancellation) => GaussHermite.Construct(Points, Convention, cancellation);

@@ -1,28 +1,19 @@
 using System;
 using System.Collections.Generic;
+using System.Diagnostics.CodeAnalysis;
 using System.IO;
 using System.Linq;
 using System.Text;
+using GaussGen.Mathematics.Baselines;
 using GaussGen.Tool.Output;
 
 namespace GaussGen.Tool.Baselines;
 
 /// <summary>The tables that were reviewed, one a line in ordinal order, so that a code review shows what changes about them.</summary>
-/// <remarks>
-/// The first line says what the file is and carries the number of its format, which grows when a line changes its meaning: also
-/// when a digest covers something else, or a claim is worded anew.
-/// </remarks>
 internal sealed class Baseline
 {
     /// <summary>The file that is meant where none is named.</summary>
     public const string DefaultFile = "gaussgen.baseline";
-
-    private const string Title = "# gaussgen baseline ";
-    private const string FormatNumber = "1";
-    private const string Header = Title + FormatNumber
-        + ": one line a reviewed table; renew it after a review with: gaussgen baseline write <assembly or folder> --file <this file>";
-
-    private const string Columns = "assembly | type | attribute | claim | format | sha256:digest";
 
     /// <summary>A baseline of these entries, of which no two have the same identity.</summary>
     public Baseline(IEnumerable<BaselineEntry> entries) =>
@@ -37,72 +28,49 @@ internal sealed class Baseline
     /// <exception cref="InputException">It is no baseline; the message names the line.</exception>
     public static Baseline Parse(ReadOnlySpan<byte> content, string path)
     {
-        Dictionary<(string, string, string), int> lines = [];
-        List<BaselineEntry> entries = [];
-        int number = 0;
+        List<string> lines = [];
+        string? undecodable = null;
         foreach (Range range in Split(content))
         {
-            number++;
-            string line = Decode(content[range], path, number);
-            if (number == 1)
+            if (!TryDecode(content[range], out string? line))
             {
-                RequireHeader(line, path);
+                undecodable = "is not UTF-8 text; save the file as UTF-8, or delete it and write it again";
+                break;
             }
-            else if (line.Length > 0)
-            {
-                BaselineEntry entry = BaselineEntry.TryParse(line, out BaselineEntry? parsed)
-                    ? parsed
-                    : throw Malformed(path, number, $"is not as a line of a baseline is ({Columns}); mend it, or delete the file and write it again");
-                if (!lines.TryAdd(entry.Identity, number))
-                {
-                    throw Malformed(path, number, $"names {entry.Type} again, after line {lines[entry.Identity]}; keep the line that was reviewed");
-                }
 
-                entries.Add(entry);
-            }
+            lines.Add(line);
         }
 
-        return new Baseline(entries);
+        // What is wrong before the bytes that are no text is told first.
+        BaselineText text = BaselineText.Parse(lines);
+        BaselineFlaw? flaw = text.Flaw ?? (undecodable is null ? null : new BaselineFlaw(lines.Count + 1, undecodable));
+        return flaw is null
+            ? new Baseline(text.Entries)
+            : throw new InputException($"{path}({flaw.Line}): the line {flaw.What}");
     }
 
     /// <summary>Writes the file: UTF-8, one line feed after each line.</summary>
     public void Write(Stream stream)
     {
         using StreamWriter writer = new(stream, new UTF8Encoding(encoderShouldEmitUTF8Identifier: false)) { NewLine = "\n" };
-        writer.WriteLine(Header);
+        writer.WriteLine(BaselineText.Header);
         foreach (BaselineEntry entry in Entries)
         {
             writer.WriteLine(entry.Line);
         }
     }
 
-    private static void RequireHeader(string line, string path)
-    {
-        if (line == Header)
-        {
-            return;
-        }
-
-        string rest = line.StartsWith(Title, StringComparison.Ordinal) ? line[Title.Length..] : "";
-        string number = rest.Split(':')[0];
-        throw number.Length == 0 || !number.All(char.IsAsciiDigit)
-            ? Malformed(path, 1, "does not begin a baseline; name another file with --file, or delete this one and write it again")
-            : number == FormatNumber
-                ? Malformed(path, 1, "is not the first line of a baseline any more; restore it, or delete the file and write it again")
-                : Malformed(path, 1, $"says format {number} and this version of the tool knows {FormatNumber}; use the version that wrote it, or delete the file and write it again");
-    }
-
-    /// <summary>A line without the carriage return that some checkouts put at its end.</summary>
-    private static string Decode(ReadOnlySpan<byte> bytes, string path, int number)
+    private static bool TryDecode(ReadOnlySpan<byte> bytes, [NotNullWhen(true)] out string? line)
     {
         try
         {
-            string line = new UTF8Encoding(false, throwOnInvalidBytes: true).GetString(bytes);
-            return (number == 1 ? line.TrimStart('\uFEFF') : line).TrimEnd('\r');
+            line = new UTF8Encoding(false, throwOnInvalidBytes: true).GetString(bytes);
+            return true;
         }
         catch (DecoderFallbackException)
         {
-            throw Malformed(path, number, "is not UTF-8 text; save the file as UTF-8, or delete it and write it again");
+            line = null;
+            return false;
         }
     }
 
@@ -126,6 +94,4 @@ internal sealed class Baseline
 
         return lines;
     }
-
-    private static InputException Malformed(string path, int line, string what) => new($"{path}({line}): the line {what}");
 }

@@ -1,6 +1,6 @@
 using System.Collections.Generic;
 using System.Linq;
-using GaussGen.Tool.Verification;
+using GaussGen.Mathematics.Baselines;
 
 namespace GaussGen.Tool.Baselines;
 
@@ -37,25 +37,7 @@ internal sealed record BaselineChange(BaselineEntry? Before, SurveyedTable? Afte
         (null, { } added) => $"{added.Path}: added {added.Entry.Type}: {added.Entry.Claim}, {added.Entry.Format}",
         ({ } removed, null) => $"{baseline}: removed {removed.Type} of {removed.Assembly}: {removed.Claim}, {removed.Format}"
             + (hasAssembly ? "" : $"; no assembly {removed.Assembly} was looked at"),
-        ({ } old, { } found) => $"{found.Path}: changed {old.Type}: {string.Join("; ", Differences(old, found.Entry))}",
+        ({ } old, { } found) => $"{found.Path}: changed {old.Type}: {string.Join("; ", old.DifferencesTo(found.Entry))}",
         _ => "",
     };
-
-    private static IEnumerable<string> Differences(BaselineEntry old, BaselineEntry found)
-    {
-        if (old.Claim != found.Claim)
-        {
-            yield return $"claim \"{old.Claim}\" is now \"{found.Claim}\"";
-        }
-
-        if (old.Format != found.Format)
-        {
-            yield return $"format {old.Format} is now {found.Format}";
-        }
-
-        if (old.Digest != found.Digest)
-        {
-            yield return $"data {TableDigest.Short(old.Digest)} is now {TableDigest.Short(found.Digest)}";
-        }
-    }
 }

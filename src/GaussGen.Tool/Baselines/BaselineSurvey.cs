@@ -1,6 +1,8 @@
 using System.Collections.Generic;
 using System.Linq;
 using System.Threading;
+using GaussGen.Mathematics.Baselines;
+using GaussGen.Tool.Reading;
 using GaussGen.Tool.Verification;
 
 namespace GaussGen.Tool.Baselines;
@@ -48,7 +50,7 @@ internal sealed record BaselineSurvey(IReadOnlyList<FileResult> Files, IReadOnly
                 results.Add(ResultOf(table, reason));
                 if (reason is null)
                 {
-                    BaselineEntry entry = BaselineEntry.Of(file.Assembly!, table);
+                    BaselineEntry entry = EntryOf(file.Assembly!, table);
                     _ = tables.TryAdd(entry, new SurveyedTable(entry, file.Path));
                 }
             }
@@ -58,6 +60,14 @@ internal sealed record BaselineSurvey(IReadOnlyList<FileResult> Files, IReadOnly
 
         return new BaselineSurvey(files, [.. tables.Values.OrderBy(table => table.Entry.Line, System.StringComparer.Ordinal)], allowsEmpty);
     }
+
+    private static BaselineEntry EntryOf(FoundAssembly assembly, ReadTable table) => BaselineEntry.Of(
+        assembly.Name,
+        table.Declared.Type.Name,
+        table.Declared.Attribute,
+        table.Claim!.Title,
+        table.Claim.Format.Name,
+        FoundDigest.Of(table.Data!, table.Family!));
 
     private static string? Reason(ReadTable table)
     {

@@ -23,6 +23,9 @@ internal sealed record ClaimFamily(string Attribute, IReadOnlyList<string> Spans
     /// <summary>Whether a constant is one of the integers that stand beside the family's spans.</summary>
     public bool IsInteger(string constant) => Spans.Contains("Nodes") && RuleIntegers.Contains(constant);
 
+    /// <summary>Whether each entry of a span has a constant of its own.</summary>
+    public bool HasEntryConstants => !Spans.Contains("Nodes");
+
     /// <summary>Whether a constant repeats an entry of a span, as "Raw3" does.</summary>
     public bool IsEntry(string constant) => Spans.Any(span =>
         constant.Length > span.Length && constant.StartsWith(span, StringComparison.Ordinal) && constant.Skip(span.Length).All(char.IsAsciiDigit));

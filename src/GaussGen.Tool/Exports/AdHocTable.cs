@@ -57,7 +57,7 @@ internal sealed record AdHocTable(string Name, string Attribute, TableRequest Re
         ClaimFamily family = ClaimTable.Find(Attribute)!;
         TableProof proof = Claim.Prove(data, progress.OfTable(0), cancellation);
         progress.EndTable(0);
-        return new ExportedTable(Name, null, null, family, proof, TableDigest.Of(data, family));
+        return new ExportedTable(Name, null, null, family, proof, FoundDigest.Of(data, family));
     }
 
     private static TableData Data(RoundedRule rule)

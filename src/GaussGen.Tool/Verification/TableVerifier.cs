@@ -43,7 +43,7 @@ internal sealed class TableVerifier
 
         try
         {
-            return Judge(table, Prove(claim, data, progress, cancellation)) with { Digest = TableDigest.Of(data, read.Family!) };
+            return Judge(table, Prove(claim, data, progress, cancellation)) with { Digest = FoundDigest.Of(data, read.Family!) };
         }
         catch (Exception error) when (error is InvalidOperationException or ArithmeticException)
         {

@@ -73,6 +73,20 @@ public sealed class IncrementalTests
     }
 
     [Fact]
+    public void A_baseline_leaves_every_step()
+    {
+        EditingSession session = new(new Consumer(Declarations, Other));
+        object[] texts = TextsOf(session);
+
+        session.Add(new MemoryText("gaussgen.baseline", "no baseline"));
+
+        Assert.All(EditingSession.StepNames, step => Assert.All(
+            session.ReasonsOf(step),
+            reason => Assert.True(reason is IncrementalStepRunReason.Cached or IncrementalStepRunReason.Unchanged, $"{step} is {reason}")));
+        Assert.Equal(texts, TextsOf(session), ReferenceEqualityComparer.Instance);
+    }
+
+    [Fact]
     public void A_changed_declaration_is_all_that_is_constructed()
     {
         EditingSession session = new(new Consumer(

@@ -87,6 +87,11 @@ public sealed record Outcome(GeneratorDriverRunResult Result, CSharpCompilation 
         .WithAnalyzers([analyzer ?? new DeclarationAnalyzer()])
         .GetAnalyzerDiagnosticsAsync(CancellationToken.None);
 
+    /// <summary>Everything that the analyzer reports beside additional files.</summary>
+    public Task<ImmutableArray<Diagnostic>> AnalyzerDiagnosticsBeside(params AdditionalText[] files) => Compilation
+        .WithAnalyzers([new DeclarationAnalyzer()], new AnalyzerOptions([.. files]))
+        .GetAnalyzerDiagnosticsAsync(CancellationToken.None);
+
     /// <summary>The same; an exception that the analyzer throws is thrown.</summary>
     public async Task<ImmutableArray<Diagnostic>> AnalyzerDiagnosticsOrThrow()
     {

@@ -1,5 +1,6 @@
 using System.Collections.Generic;
 using System.Linq;
+using System.Text;
 using System.Threading;
 using System.Threading.Tasks;
 using GaussGen.Generator.Diagnostics;
@@ -8,6 +9,7 @@ using Microsoft.CodeAnalysis.CSharp;
 using Microsoft.CodeAnalysis.CSharp.Testing;
 using Microsoft.CodeAnalysis.Diagnostics;
 using Microsoft.CodeAnalysis.Testing;
+using Microsoft.CodeAnalysis.Text;
 
 namespace GaussGen.Generator.Tests.Support;
 
@@ -36,6 +38,14 @@ internal sealed class DeclarationTest : CSharpSourceGeneratorTest<TableGenerator
 
     public static Task Report(LanguageVersion languageVersion, params string[] sources) =>
         new DeclarationTest(languageVersion, sources).RunAsync(CancellationToken.None);
+
+    /// <summary>The same beside additional files, which have marks as well.</summary>
+    public static Task ReportBeside((string Path, string Text)[] files, params string[] sources)
+    {
+        DeclarationTest test = new(LanguageVersion.Latest, sources);
+        test.TestState.AdditionalFiles.AddRange(files.Select(file => (file.Path, SourceText.From(file.Text, Encoding.UTF8))));
+        return test.RunAsync(CancellationToken.None);
+    }
 
     protected override ParseOptions CreateParseOptions() => new CSharpParseOptions(_languageVersion, DocumentationMode.Diagnose);
 

@@ -57,6 +57,13 @@ internal sealed class EditingSession
         Run();
     }
 
+    /// <summary>Adds a file that is no source.</summary>
+    public void Add(AdditionalText file)
+    {
+        _driver = _driver.AddAdditionalTexts([file]);
+        Run();
+    }
+
     /// <summary>Why each value of a step is what it is after the last edit.</summary>
     public IEnumerable<IncrementalStepRunReason> ReasonsOf(string step) => OutputsOf(step).Select(output => output.Reason);
 

@@ -25,7 +25,7 @@ public sealed class BaselineFormatTests : IDisposable
     [Theory]
     [InlineData("# Notes\n", 1, "does not begin a baseline")]
     [InlineData("# gaussgen baseline one\n", 1, "does not begin a baseline")]
-    [InlineData("# gaussgen baseline 2: more\n", 1, "says format 2 and this version of the tool knows 1")]
+    [InlineData("# gaussgen baseline 2: more\n", 1, "says format 2 and this version knows 1")]
     [InlineData("# gaussgen baseline 1: hand-made\n", 1, "is not the first line of a baseline any more")]
     [InlineData(Header + "<<<<<<< HEAD\n" + Line, 2, "is not as a line of a baseline is")]
     [InlineData(Header + Line + "# a remark\n", 3, "is not as a line of a baseline is")]
