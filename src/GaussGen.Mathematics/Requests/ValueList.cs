@@ -29,8 +29,9 @@ public sealed class ValueList : IReadOnlyList<double>, IEquatable<ValueList>
     /// <summary>The number at an index from 0.</summary>
     public double this[int index] => _values[index];
 
+    // Not as an extension method: that would bind to spans where the compiler host has them, and drag their assembly in.
     /// <inheritdoc/>
-    public bool Equals(ValueList? other) => other is not null && _values.SequenceEqual(other._values);
+    public bool Equals(ValueList? other) => other is not null && Enumerable.SequenceEqual(_values, other._values);
 
     /// <inheritdoc/>
     public override bool Equals(object? obj) => Equals(obj as ValueList);
