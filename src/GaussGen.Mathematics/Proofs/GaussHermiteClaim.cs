@@ -63,7 +63,7 @@ public sealed record GaussHermiteClaim : TableClaim
 
     /// <inheritdoc/>
     public override string Title =>
-        ClaimTitle.GaussHermite(Points, Weight == HermiteWeight.ExponentialOfMinusSquare, DropZeroWeights);
+        ClaimTitle.GaussHermite(Points, Weight == HermiteWeight.ExponentialOfMinusSquare, DropZeroWeights, hasErrorEstimate: false);
 
     /// <inheritdoc/>
     public override string Method =>

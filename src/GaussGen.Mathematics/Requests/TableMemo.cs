@@ -1,7 +1,9 @@
 using System;
+using System.Linq;
 using System.Threading;
 using GaussGen.Mathematics.Moments;
 using GaussGen.Mathematics.Rules;
+using GaussGen.Mathematics.Sequences;
 
 namespace GaussGen.Mathematics.Requests;
 
@@ -33,7 +35,7 @@ public static class TableMemo
     public static RoundedRule Get(RuleRequest request, CancellationToken cancellation) => (RoundedRule)Memo.Get(
         request,
         token => RuleRounding.Round(request.Construct(token), request.Format, request.DropZeroWeights, token),
-        rule => ((RoundedRule)rule).Table.Nodes.Count * 2,
+        rule => (((RoundedRule)rule).Table.Nodes.Count + (((RoundedRule)rule).Companion?.Nodes.Count ?? 0)) * 2,
         cancellation);
 
     /// <summary>The moments that are asked for, in their number format.</summary>
@@ -43,5 +45,14 @@ public static class TableMemo
         request,
         token => MomentRounding.Round(request.Construct(token), request.Format, token),
         moments => ((RoundedMoments)moments).Raw.Count * 3,
+        cancellation);
+
+    /// <summary>The lists that are asked for, in their number format.</summary>
+    /// <exception cref="InvalidOperationException">An entry's rounding cannot be decided.</exception>
+    /// <exception cref="OperationCanceledException">The token was cancelled.</exception>
+    public static RoundedSequences Get(SequenceRequest request, CancellationToken cancellation) => (RoundedSequences)Memo.Get(
+        request,
+        token => SequenceRounding.Round(request.Construct(token), request.Format, token),
+        sequences => ((RoundedSequences)sequences).Values.Sum(values => values.Count),
         cancellation);
 }

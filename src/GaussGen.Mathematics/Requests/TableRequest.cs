@@ -2,6 +2,7 @@ using System.Threading;
 using GaussGen.Mathematics.Formats;
 using GaussGen.Mathematics.Moments;
 using GaussGen.Mathematics.Rules;
+using GaussGen.Mathematics.Sequences;
 
 namespace GaussGen.Mathematics.Requests;
 
@@ -24,6 +25,9 @@ public abstract record TableRequest(BinaryFormat Format)
 /// <param name="DropZeroWeights">Whether nodes whose weight rounds to zero are left out.</param>
 public abstract record RuleRequest(BinaryFormat Format, bool DropZeroWeights) : TableRequest(Format)
 {
+    /// <summary>Whether the rule is to have a companion that estimates its error; see <see cref="RuleTable.Companion"/>.</summary>
+    public bool ErrorEstimate { get; init; }
+
     /// <summary>Constructs the rule, before rounding.</summary>
     /// <exception cref="System.OperationCanceledException">The token was cancelled.</exception>
     public abstract RuleTable Construct(CancellationToken cancellation);
@@ -36,4 +40,13 @@ public abstract record MomentRequest(BinaryFormat Format) : TableRequest(Format)
     /// <summary>Constructs the moments, before rounding.</summary>
     /// <exception cref="System.OperationCanceledException">The token was cancelled.</exception>
     public abstract MomentTable Construct(CancellationToken cancellation);
+}
+
+/// <summary>A request for named lists of numbers that are neither a rule nor the moments of a distribution.</summary>
+/// <param name="Format">The number format of every entry.</param>
+public abstract record SequenceRequest(BinaryFormat Format) : TableRequest(Format)
+{
+    /// <summary>Constructs the lists, before rounding.</summary>
+    /// <exception cref="System.OperationCanceledException">The token was cancelled.</exception>
+    public abstract SequenceTable Construct(CancellationToken cancellation);
 }

@@ -16,7 +16,7 @@ public sealed record GaussHermiteRequest(int Points, HermiteConvention Conventio
     : RuleRequest(Format, DropZeroWeights)
 {
     /// <inheritdoc/>
-    public override string Claim => ClaimTitle.GaussHermite(Points, Convention == HermiteConvention.Physicist, DropZeroWeights);
+    public override string Claim => ClaimTitle.GaussHermite(Points, Convention == HermiteConvention.Physicist, DropZeroWeights, ErrorEstimate);
 
     /// <inheritdoc/>
     /// <exception cref="System.ArgumentOutOfRangeException"><see cref="Points"/> is out of range.</exception>

@@ -26,4 +26,18 @@ public sealed record RoundedRule(
 {
     /// <summary>The rounded values of <see cref="RuleTable.Constants"/>, in their order.</summary>
     public IReadOnlyList<RoundedValue> Constants { get; init; } = [];
+
+    /// <summary>The rounded <see cref="RuleTable.Companion"/>; <c>null</c> where there is none.</summary>
+    public RoundedCompanion? Companion { get; init; }
 }
+
+/// <summary>A companion rule in one number format; every entry is proven to be the nearest representable value.</summary>
+/// <param name="Table">The companion before rounding.</param>
+/// <param name="Nodes">The kept nodes, ascending; those with a weight that rounds to zero are left out if the rule's are.</param>
+/// <param name="Weights">Their weights.</param>
+/// <param name="Factor">The rounded <see cref="CompanionRule.Factor"/>.</param>
+public sealed record RoundedCompanion(
+    CompanionRule Table,
+    IReadOnlyList<RoundedValue> Nodes,
+    IReadOnlyList<RoundedValue> Weights,
+    RoundedValue Factor);

@@ -44,8 +44,23 @@ public static class RuleRounding
             family is null ? null : Rounding.Nearest(family.NodeScale, format, cancellation),
             family is null ? null : Rounding.Nearest(Reciprocal(family.TotalWeight), format, cancellation))
         {
+            Companion = table.Companion is { } companion ? Round(companion, format, dropZeroWeights, cancellation) : null,
             Constants = [.. table.Constants.Select(constant => Rounding.Nearest(constant.Value, format, cancellation))],
         };
+    }
+
+    private static RoundedCompanion Round(
+        CompanionRule table, BinaryFormat format, bool dropZeroWeights, CancellationToken cancellation)
+    {
+        RoundedValue[] weights = RoundAll(table.Weights, table.IsSymmetric, negated: false, format, cancellation);
+        RoundedValue[] nodes = RoundAll(table.Nodes, table.IsSymmetric, negated: true, format, cancellation);
+        RequireFinite(nodes, format);
+        if (dropZeroWeights)
+        {
+            (nodes, weights) = DropZeros(nodes, weights, format);
+        }
+
+        return new RoundedCompanion(table, nodes, weights, Rounding.Nearest(RealNumber.Exact(table.Factor), format, cancellation));
     }
 
     private static void RequireFinite(RoundedValue[] nodes, BinaryFormat format)

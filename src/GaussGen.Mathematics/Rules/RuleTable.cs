@@ -32,6 +32,25 @@ public sealed record LocationScale(RealNumber NodeScale, RealNumber TotalWeight)
 /// <param name="Summary">What it is, as a sentence without markup.</param>
 public sealed record NamedConstant(string Name, RealNumber Value, string Summary);
 
+/// <summary>
+/// A second rule for the same weight function, by which the error of the first is estimated: |companion sum − rule's sum| · factor.
+/// </summary>
+/// <param name="Title">What it is, as a noun phrase: "anti-Gaussian rule".</param>
+/// <param name="Nodes">Its nodes, ascending.</param>
+/// <param name="Weights">Its weights, in the order of the nodes, with the same sum as the rule's own.</param>
+/// <param name="IsSymmetric">See <see cref="RuleTable.IsSymmetric"/>.</param>
+/// <param name="Factor">What the difference is multiplied by: ½ for an anti-Gaussian rule, 1 for a rule of a lower degree.</param>
+/// <param name="Method">How its entries were enclosed, as <see cref="RuleDescription.Method"/>.</param>
+/// <param name="Sources">Where the formulas come from: author, year or publication, number.</param>
+public sealed record CompanionRule(
+    string Title,
+    IReadOnlyList<RealNumber> Nodes,
+    IReadOnlyList<RealNumber> Weights,
+    bool IsSymmetric,
+    Rational Factor,
+    string Method,
+    string Sources);
+
 /// <summary>A rule before a number format is chosen: Σ wᵢ f(xᵢ) ≈ ∫ f(x) w(x) dx.</summary>
 /// <param name="Description">The words for the documentation.</param>
 /// <param name="Nodes">The nodes, ascending.</param>
@@ -49,4 +68,7 @@ public sealed record RuleTable(
 {
     /// <summary>Numbers beside the nodes and weights that belong to the rule.</summary>
     public IReadOnlyList<NamedConstant> Constants { get; init; } = [];
+
+    /// <summary>The rule by which the error is estimated; <c>null</c> where no estimate was asked for.</summary>
+    public CompanionRule? Companion { get; init; }
 }
