@@ -4,6 +4,7 @@ using System.Linq;
 using System.Text;
 using System.Threading;
 using GaussGen.Mathematics.Arithmetic;
+using GaussGen.Mathematics.Baselines;
 using GaussGen.Mathematics.Formats;
 using GaussGen.Mathematics.Requests;
 using GaussGen.Mathematics.Rules.Universal;
@@ -48,6 +49,9 @@ public sealed record GaussEvenExponentialRequest : RuleRequest
     /// <summary>Whether numbers can be the coefficients: one to <see cref="MaximumCoefficients"/> finite ones, the last above zero.</summary>
     public static bool AreCoefficients(ValueList values) => values is { Count: > 0 and <= MaximumCoefficients }
         && values.All(Parameters.IsFinite) && values[values.Count - 1] > 0;
+
+    /// <inheritdoc/>
+    public override string Claim => ClaimTitle.GaussEvenExponential(Points, Coefficients, DropZeroWeights, ErrorEstimate);
 
     /// <inheritdoc/>
     /// <exception cref="RuleConstructionException">The rule cannot be constructed; the exception says why.</exception>

@@ -1,6 +1,7 @@
 using System;
 using System.Globalization;
 using System.Threading;
+using GaussGen.Mathematics.Baselines;
 using GaussGen.Mathematics.Formats;
 using GaussGen.Mathematics.Requests;
 using GaussGen.Mathematics.Rules.Universal;
@@ -53,6 +54,9 @@ public sealed record GaussGeneralizedHermiteRequest : RuleRequest
 
     /// <summary>Whether a number can be the exponent.</summary>
     public static bool IsExponent(double value) => value is > InfimumExponent and <= MaximumExponent;
+
+    /// <inheritdoc/>
+    public override string Claim => ClaimTitle.GaussGeneralizedHermite(Points, Exponent, DropZeroWeights, ErrorEstimate);
 
     /// <inheritdoc/>
     /// <exception cref="RuleConstructionException">The rule cannot be constructed; the exception says why.</exception>

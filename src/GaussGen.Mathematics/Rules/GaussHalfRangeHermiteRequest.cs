@@ -1,5 +1,6 @@
 using System.Threading;
 using GaussGen.Mathematics.Arithmetic;
+using GaussGen.Mathematics.Baselines;
 using GaussGen.Mathematics.Formats;
 using GaussGen.Mathematics.Requests;
 using GaussGen.Mathematics.Rules.Universal;
@@ -27,6 +28,9 @@ public sealed record GaussHalfRangeHermiteRequest : RuleRequest
 
     /// <summary>The number of nodes.</summary>
     public int Points { get; }
+
+    /// <inheritdoc/>
+    public override string Claim => ClaimTitle.GaussHalfRangeHermite(Points, DropZeroWeights, ErrorEstimate);
 
     /// <inheritdoc/>
     /// <exception cref="RuleConstructionException">The rule cannot be constructed; the exception says why.</exception>

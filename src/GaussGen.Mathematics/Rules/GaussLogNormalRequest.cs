@@ -1,6 +1,7 @@
 using System;
 using System.Threading;
 using GaussGen.Mathematics.Arithmetic;
+using GaussGen.Mathematics.Baselines;
 using GaussGen.Mathematics.Formats;
 using GaussGen.Mathematics.Requests;
 using GaussGen.Mathematics.Rules.Universal;
@@ -54,6 +55,9 @@ public sealed record GaussLogNormalRequest : RuleRequest
 
     /// <summary>The standard deviation of the logarithm.</summary>
     public double LogStandardDeviation { get; }
+
+    /// <inheritdoc/>
+    public override string Claim => ClaimTitle.GaussLogNormal(Points, LogMean, LogStandardDeviation, DropZeroWeights, ErrorEstimate);
 
     /// <inheritdoc/>
     /// <exception cref="RuleConstructionException">

@@ -2,6 +2,7 @@ using System;
 using System.Globalization;
 using System.Linq;
 using System.Threading;
+using GaussGen.Mathematics.Baselines;
 using GaussGen.Mathematics.Formats;
 using GaussGen.Mathematics.Requests;
 using GaussGen.Mathematics.Rules.Universal;
@@ -66,6 +67,10 @@ public sealed record GaussNormalMixtureRequest : RuleRequest
 
     /// <summary>Whether numbers can be the weights of a mixture.</summary>
     public static bool AreWeights(ValueList values) => values.All(value => value >= 0 && Parameters.IsFinite(value)) && values.Any(value => value > 0);
+
+    /// <inheritdoc/>
+    public override string Claim => ClaimTitle.GaussNormalMixture(
+        Points, Weights, Means, StandardDeviations, DropZeroWeights, ErrorEstimate);
 
     /// <inheritdoc/>
     /// <exception cref="RuleConstructionException">The rule cannot be constructed; the exception says why.</exception>

@@ -1,6 +1,7 @@
 using System;
 using System.Threading;
 using GaussGen.Mathematics.Arithmetic;
+using GaussGen.Mathematics.Baselines;
 using GaussGen.Mathematics.Formats;
 using GaussGen.Mathematics.Requests;
 using GaussGen.Mathematics.Rules.Universal;
@@ -53,6 +54,9 @@ public sealed record GaussTruncatedNormalRequest : RuleRequest
 
     /// <summary>Whether two numbers can be the ends: the lower below the upper, and one of them finite.</summary>
     public static bool IsInterval(double lower, double upper) => lower < upper && !(double.IsInfinity(lower) && double.IsInfinity(upper));
+
+    /// <inheritdoc/>
+    public override string Claim => ClaimTitle.GaussTruncatedNormal(Points, Lower, Upper, DropZeroWeights, ErrorEstimate);
 
     /// <inheritdoc/>
     /// <exception cref="RuleConstructionException">
