@@ -2,7 +2,7 @@ using System;
 
 namespace GaussGen.Mathematics.Rules;
 
-/// <summary>Why a rule cannot be constructed though each of its parameters is in its range.</summary>
+/// <summary>Why a rule, or a table of moments, cannot be constructed though each of its parameters is in its range.</summary>
 public enum RuleFailure
 {
     /// <summary>The probability of the interval is below 2^−1022.</summary>
@@ -14,7 +14,7 @@ public enum RuleFailure
     /// <summary>A node is too large for the number format: ask for fewer points or a smaller scale.</summary>
     NodeNotRepresentable,
 
-    /// <summary>The weight function cannot be resolved within the limits on precision and on the points of a quadrature.</summary>
+    /// <summary>The weight function, or a moment, cannot be resolved within the limits on precision and on the points of a quadrature.</summary>
     RecurrenceNotDetermined,
 
     /// <summary>A node of the error estimate's companion rule is outside the interval of the weight function.</summary>
@@ -25,13 +25,16 @@ public enum RuleFailure
 
     /// <summary>A number is as good as half-way between two representable ones.</summary>
     RoundingNotDecided,
+
+    /// <summary>A moment is so large that no number format could hold it: ask for a lower order or for smaller parameters.</summary>
+    MomentNotRepresentable,
 }
 
-/// <summary>A rule that cannot be constructed though each of its parameters is in its range.</summary>
+/// <summary>A rule, or a table of moments, that cannot be constructed though each of its parameters is in its range.</summary>
 /// <param name="failure">Why.</param>
 /// <param name="message">What to change, as a sentence.</param>
 public sealed class RuleConstructionException(RuleFailure failure, string message) : Exception(message)
 {
-    /// <summary>Why the rule cannot be constructed.</summary>
+    /// <summary>Why it cannot be constructed.</summary>
     public RuleFailure Failure { get; } = failure;
 }
