@@ -13,7 +13,7 @@ namespace GaussGen;
 /// Every entry is the representable value nearest to the true one, ties to even.</para>
 /// <para>An argument means its exact binary value: <c>0.1</c> is the double nearest to one tenth, and the moments are those of
 /// that number.</para>
-/// <para>The type and all types that contain it must be partial. A type carries one table at most. The attribute stays in the
+/// <para>The type and all types that contain it must be partial. A type carries one table of moments at most. The attribute stays in the
 /// compiled assembly, so that a later check can read what was asked for.</para>
 /// <para>Formulas: E (X − μ)²ᵏ = σ²ᵏ (2k − 1)!!; E |X − μ|ᵏ = σᵏ 2^(k/2) Γ((k + 1)/2)/√π (Papoulis 1965, section 5-4).</para>
 /// </remarks>

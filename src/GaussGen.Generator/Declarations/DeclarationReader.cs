@@ -24,7 +24,7 @@ internal static class DeclarationReader
             return null;
         }
 
-        ImmutableArray<Family> colliding = families.Where(each => each.Shape == family.Shape && each.FindOn(type) is not null).ToImmutableArray();
+        ImmutableArray<Family> colliding = families.Where(each => family.NameSharedWith(each) is not null && each.FindOn(type) is not null).ToImmutableArray();
         if (colliding[0] != family)
         {
             return null;
@@ -35,12 +35,13 @@ internal static class DeclarationReader
         TableRequest request = family.ReadRequest(arguments);
         bool isSound = !arguments.IsRefusedByCompiler && arguments.Mistakes.Count == 0 && colliding.Length == 1
             && target.Chain.All(header => header.TypeParameters.Length == 0);
-        ImmutableArray<TakenName> taken = TakenMember.FindIn(type, family.Shape, families, site.SemanticModel.Compilation)
+        ImmutableArray<TakenName> taken = TakenMember.FindIn(type, family, families, site.SemanticModel.Compilation)
             .Select(member => member.Name)
             .Distinct()
             .OrderBy(name => name)
             .ToImmutableArray();
-        return new Declaration(target, family.Name, request, arguments.OrderAsWritten, isSound, new EquatableArray<TakenName>(taken));
+        return new Declaration(
+            target, family.Name, request, family.OwnNames, arguments.OrderAsWritten, isSound, new EquatableArray<TakenName>(taken));
     }
 
     // The compiler refuses a second attribute of the same family, here or on another part of the type; the first one counts.

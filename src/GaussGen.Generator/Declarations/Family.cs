@@ -1,4 +1,5 @@
 using System;
+using System.Collections.Generic;
 using System.Collections.Immutable;
 using System.Linq;
 using GaussGen.Mathematics.Requests;
@@ -14,6 +15,9 @@ internal enum TableShape
 
     /// <summary>Raw, central and absolute moments by order.</summary>
     Moments,
+
+    /// <summary>Lists of numbers under names that are the family's own.</summary>
+    Sequences,
 }
 
 /// <summary>A family of tables: the attribute that asks for one, and how its arguments become a request.</summary>
@@ -23,10 +27,13 @@ internal sealed class Family
 
     private readonly string _attributeTypeName;
 
-    private Family(string name, TableShape shape, Func<ArgumentReader, TableRequest> readRequest)
+    private Family(
+        string name, TableShape shape, string sizeArgument, IEnumerable<string> ownNames, Func<ArgumentReader, TableRequest> readRequest)
     {
         Name = name;
         Shape = shape;
+        SizeArgument = sizeArgument;
+        OwnNames = new EquatableArray<string>(ownNames);
         ReadRequest = readRequest;
         _attributeTypeName = name + "Attribute";
     }
@@ -35,6 +42,14 @@ internal sealed class Family
     public string Name { get; }
 
     public TableShape Shape { get; }
+
+    /// <summary>The argument that says how large a table is: what to change where a large one cannot be made.</summary>
+    public string SizeArgument { get; }
+
+    /// <summary>
+    /// The members that no other family of the shape need have: constants of a rule, and the lists of a family of sequences.
+    /// </summary>
+    public EquatableArray<string> OwnNames { get; }
 
     /// <summary>
     /// Makes the request. Arguments out of range are noted by the reader and replaced by the nearest that are allowed, so that
@@ -45,11 +60,27 @@ internal sealed class Family
     /// <summary>The attribute's full name in metadata.</summary>
     public string AttributeName => AttributeNamespace + "." + _attributeTypeName;
 
-    public static Family OfRules(string name, Func<ArgumentReader, RuleRequest> readRequest) =>
-        new(name, TableShape.Rule, readRequest);
+    public static Family OfRules(
+        string name,
+        Func<ArgumentReader, RuleRequest> readRequest,
+        string sizeArgument = ArgumentReader.PointsArgument,
+        params string[] constants) =>
+        new(name, TableShape.Rule, sizeArgument, constants, read => readRequest(read) with { ErrorEstimate = read.ErrorEstimate() });
 
     public static Family OfMoments(string name, Func<ArgumentReader, MomentRequest> readRequest) =>
-        new(name, TableShape.Moments, readRequest);
+        new(name, TableShape.Moments, ArgumentReader.MaximumOrderArgument, Array.Empty<string>(), readRequest);
+
+    public static Family OfSequences(
+        string name, Func<ArgumentReader, SequenceRequest> readRequest, string sizeArgument, params string[] lists) =>
+        new(name, TableShape.Sequences, sizeArgument, lists, readRequest);
+
+    /// <summary>A name that members of tables of both families have, so that no type can have both; <c>null</c> if there is none.</summary>
+    public string? NameSharedWith(Family other) => Shape != other.Shape ? null : Shape switch
+    {
+        TableShape.Rule => "Nodes",
+        TableShape.Moments => "Raw",
+        _ => OwnNames.Intersect(other.OwnNames).FirstOrDefault(),
+    };
 
     /// <summary>The attribute of this family on a type, or <c>null</c>; the first in the source, if there are more.</summary>
     public AttributeData? FindOn(INamedTypeSymbol type)

@@ -13,32 +13,35 @@ internal readonly record struct TakenMember(TakenName Name, ISymbol Holder)
 {
     private const string Getter = "get_";
 
-    /// <summary>The names that generated members of a shape can have; all that is asked for here is that none is missing.</summary>
-    private static readonly ImmutableDictionary<TableShape, Regex> GeneratedNames = ImmutableDictionary<TableShape, Regex>.Empty
-        .Add(TableShape.Rule, new Regex("^(PointCount|DegreeOfExactness|Expectation|Integral|(GaussGen)?(Nodes|Weights))$", RegexOptions.CultureInvariant))
-        .Add(TableShape.Moments, new Regex("^(GaussGen)?(Raw|Central|Absolute)[0-9]*$", RegexOptions.CultureInvariant));
-
-    /// <summary>A member that every table of a shape has.</summary>
-    private static readonly ImmutableDictionary<TableShape, string> FirstNames = ImmutableDictionary<TableShape, string>.Empty
-        .Add(TableShape.Rule, "Nodes")
-        .Add(TableShape.Moments, "Raw");
-
-    /// <summary>Whether a generated member of a shape might have a name.</summary>
-    public static bool MightBeGenerated(TableShape shape, string name) => GeneratedNames[shape].IsMatch(name);
+    private const string ArrayPrefix = "GaussGen";
 
     /// <summary>
-    /// The names in use that generated members might have: the type's own name, its other members, and members that it
+    /// The names that generated members of a shape can have beside the family's own; all that is asked for here is that none is missing.
+    /// </summary>
+    private static readonly ImmutableDictionary<TableShape, Regex> GeneratedNames = ImmutableDictionary<TableShape, Regex>.Empty
+        .Add(TableShape.Rule, new Regex(
+            "^(PointCount|DegreeOfExactness|Expectation|ExpectationWithError|Integral|(GaussGen)?(Companion)?(Nodes|Weights))$",
+            RegexOptions.CultureInvariant))
+        .Add(TableShape.Moments, new Regex("^(GaussGen)?(Raw|Central|Absolute)[0-9]*$", RegexOptions.CultureInvariant));
+
+    /// <summary>Whether a generated member of a family might have a name.</summary>
+    public static bool MightBeGenerated(Family family, string name) =>
+        (GeneratedNames.TryGetValue(family.Shape, out Regex? pattern) && pattern.IsMatch(name))
+        || family.OwnNames.Any(own => name == own || name == ArrayPrefix + own);
+
+    /// <summary>
+    /// The names in use that generated members of a family might have: the type's own name, its other members, and members that it
     /// inherits, which the generated ones would hide.
     /// </summary>
     public static IEnumerable<TakenMember> FindIn(
-        INamedTypeSymbol type, TableShape shape, ImmutableArray<Family> families, Compilation compilation)
+        INamedTypeSymbol type, Family family, ImmutableArray<Family> families, Compilation compilation)
     {
-        if (MightBeGenerated(shape, type.Name))
+        if (MightBeGenerated(family, type.Name))
         {
             yield return new TakenMember(new TakenName(type.Name, null), type);
         }
 
-        foreach (TakenMember own in MembersOf(type, shape)
+        foreach (TakenMember own in MembersOf(type, family)
             .GroupBy(own => own.Holder.DeclaringSyntaxReferences.FirstOrDefault()?.SyntaxTree)
             .Where(file => !IsGenerated(file.First().Holder))
             .SelectMany(file => file))
@@ -48,7 +51,7 @@ internal readonly record struct TakenMember(TakenName Name, ISymbol Holder)
 
         for (INamedTypeSymbol? ancestor = type.BaseType; ancestor is not null; ancestor = ancestor.BaseType)
         {
-            foreach (TakenMember inherited in MembersOf(ancestor, shape))
+            foreach (TakenMember inherited in MembersOf(ancestor, family))
             {
                 if (compilation.IsSymbolAccessibleWithin(inherited.Holder, type))
                 {
@@ -57,25 +60,29 @@ internal readonly record struct TakenMember(TakenName Name, ISymbol Holder)
             }
 
             // While the generator runs, what it writes for the ancestor is not there yet.
-            if (families.Any(family => family.Shape == shape && family.FindOn(ancestor) is not null))
+            foreach (Family other in families)
             {
-                yield return new TakenMember(new TakenName(FirstNames[shape], null), ancestor);
+                if (family.NameSharedWith(other) is { } shared && other.FindOn(ancestor) is not null)
+                {
+                    yield return new TakenMember(new TakenName(shared, null), ancestor);
+                    break;
+                }
             }
         }
     }
 
-    private static IEnumerable<TakenMember> MembersOf(INamedTypeSymbol type, TableShape shape)
+    private static IEnumerable<TakenMember> MembersOf(INamedTypeSymbol type, Family family)
     {
         foreach (ISymbol member in type.GetMembers())
         {
-            if (MightBeGenerated(shape, member.Name))
+            if (MightBeGenerated(family, member.Name))
             {
                 string? signature = member is IMethodSymbol method ? MethodSignature.Of(method) : null;
                 yield return new TakenMember(new TakenName(member.Name, signature), member);
             }
             else if (member is IMethodSymbol { MethodKind: MethodKind.Ordinary } accessor
                 && accessor.Name.StartsWith(Getter, System.StringComparison.Ordinal)
-                && MightBeGenerated(shape, accessor.Name.Substring(Getter.Length)))
+                && MightBeGenerated(family, accessor.Name.Substring(Getter.Length)))
             {
                 yield return new TakenMember(new TakenName(accessor.Name.Substring(Getter.Length), null), accessor);
             }

@@ -76,7 +76,7 @@ internal static class DiagnosticDescriptors
         "GAUSS012",
         Category.Range,
         "Weights round to zero",
-        "{0} of the {1} weights round to zero in {2}, those of the nodes of magnitude {3} and more; set DropZeroWeights = true to leave those nodes out, or ask for fewer points");
+        "{0} of the {1} weights round to zero in {2}, those of nodes of magnitude {3} and more; set DropZeroWeights = true to leave those nodes out, or ask for fewer points");
 
     public static readonly DiagnosticDescriptor LanguageVersion = Mistake(
         "GAUSS013",
@@ -96,9 +96,107 @@ internal static class DiagnosticDescriptors
         "A baseline cannot be read",
         "Tables are not compared with {1}, for line {0} {2}");
 
+    public static readonly DiagnosticDescriptor EmptyInterval = Mistake(
+        "GAUSS016",
+        Category.Argument,
+        "An interval is empty",
+        "Make 'upper' larger than 'lower': from {0} to {1} there is no interval");
+
+    public static readonly DiagnosticDescriptor NotANumber = Mistake(
+        "GAUSS017",
+        Category.Argument,
+        "The end of an interval is not a number",
+        "Give '{0}' a number or an infinity instead of NaN");
+
+    public static readonly DiagnosticDescriptor WholeLine = Mistake(
+        "GAUSS018",
+        Category.Argument,
+        "An interval is the whole line",
+        "Make 'lower' or 'upper' finite, or use [GaussHermite] or [NormalMoments]: on the whole line the distribution is the normal one");
+
+    public static readonly DiagnosticDescriptor ValueCount = Mistake(
+        "GAUSS019",
+        Category.Argument,
+        "A list has too few or too many values",
+        "Give '{0}' from 1 to {1} values instead of {2}");
+
+    public static readonly DiagnosticDescriptor UnequalCounts = Mistake(
+        "GAUSS020",
+        Category.Argument,
+        "Lists differ in length",
+        "Give '{0}' as many values as '{1}': it has {2} and not {3}");
+
+    public static readonly DiagnosticDescriptor NotAWeight = Mistake(
+        "GAUSS021",
+        Category.Argument,
+        "A weight of a mixture is negative or not finite",
+        "Give '{0}' values that are finite and not negative instead of {1}");
+
+    public static readonly DiagnosticDescriptor NoWeight = Mistake(
+        "GAUSS022",
+        Category.Argument,
+        "All weights of a mixture are zero",
+        "Give at least one of the '{0}' a value above zero");
+
+    public static readonly DiagnosticDescriptor LeadingCoefficient = Mistake(
+        "GAUSS023",
+        Category.Argument,
+        "The leading coefficient is not positive",
+        "Make the last coefficient positive instead of {0}: it belongs to the highest power, x^{1}, and the density must fall off");
+
+    public static readonly DiagnosticDescriptor ExponentOutOfRange = Mistake(
+        "GAUSS024",
+        Category.Argument,
+        "The exponent is out of range",
+        "Give 'exponent' a value above {1} and at most {2} instead of {0}");
+
+    public static readonly DiagnosticDescriptor LevelOutOfRange = Mistake(
+        "GAUSS025",
+        Category.Argument,
+        "There is no such level",
+        "Ask for a level from {1} to {2} instead of {0}");
+
+    public static readonly DiagnosticDescriptor SizeOutOfRange = Mistake(
+        "GAUSS026",
+        Category.Argument,
+        "The size of a table is out of range",
+        "Give '{3}' a value from {1} to {2} instead of {0}");
+
+    public static readonly DiagnosticDescriptor ConstantOutOfRange = Mistake(
+        "GAUSS027",
+        Category.Range,
+        "A constant of a rule is out of the number format's range",
+        "Use a wider format, or measure in a unit that makes the constant more moderate: {0} is too {1} for {2}");
+
+    public static readonly DiagnosticDescriptor EntryOverflow = Mistake(
+        "GAUSS028",
+        Category.Range,
+        "An entry of a list is too large for the number format",
+        "Lower '{0}', or use a wider format: entry {1} of {2} is too large for {3}");
+
+    public static readonly DiagnosticDescriptor MassTooSmall = Failure("GAUSS029", "The probability of an interval is too small");
+
+    public static readonly DiagnosticDescriptor WeightNotRepresentable = Failure("GAUSS030", "A weight is too small");
+
+    public static readonly DiagnosticDescriptor NodeNotRepresentable = Failure("GAUSS031", "A node is out of range");
+
+    public static readonly DiagnosticDescriptor NotDetermined = Failure("GAUSS032", "A distribution cannot be resolved within the limits");
+
+    public static readonly DiagnosticDescriptor CompanionOutsideInterval = Failure("GAUSS033", "An error estimate would leave the interval");
+
+    public static readonly DiagnosticDescriptor NoCompanion = Failure("GAUSS034", "There is no error estimate for the rule");
+
+    public static readonly DiagnosticDescriptor RoundingNotDecided = Failure("GAUSS035", "The rounding of an entry cannot be decided");
+
     public static ImmutableArray<DiagnosticDescriptor> All { get; } = ImmutableArray.Create(
         NotPartial, Generic, FileLocal, PointsOutOfRange, CollidingTables, NameTaken, NotFinite, NotPositive, OrderOutOfRange, Undefined,
-        MomentOverflow, ZeroWeights, LanguageVersion, NotAsReviewed, NoBaseline);
+        MomentOverflow, ZeroWeights, LanguageVersion, NotAsReviewed, NoBaseline, EmptyInterval, NotANumber, WholeLine, ValueCount, UnequalCounts,
+        NotAWeight, NoWeight, LeadingCoefficient, ExponentOutOfRange, LevelOutOfRange, SizeOutOfRange, ConstantOutOfRange, EntryOverflow,
+        MassTooSmall, WeightNotRepresentable, NodeNotRepresentable, NotDetermined, CompanionOutsideInterval, NoCompanion, RoundingNotDecided);
+
+    /// <summary>What makes a construction fail though each argument is in its range; the mathematics says what to change.</summary>
+    private static DiagnosticDescriptor Failure(string id, string title) =>
+        Mistake(id, Category.Range, title, "No table can be made of [{0}]: {1}");
 
     private static DiagnosticDescriptor Mistake(string id, string category, string title, string message) =>
         new(id, title, message, category, DiagnosticSeverity.Error, isEnabledByDefault: true, helpLinkUri: HelpLink.Of(id));

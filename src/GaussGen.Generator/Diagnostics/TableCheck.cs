@@ -4,7 +4,6 @@ using System.Linq;
 using System.Threading;
 using GaussGen.Generator.Declarations;
 using GaussGen.Generator.Emission;
-using GaussGen.Mathematics.Moments;
 using GaussGen.Mathematics.Requests;
 using GaussGen.Mathematics.Rules;
 using Microsoft.CodeAnalysis;
@@ -40,7 +39,7 @@ internal static class TableCheck
 
             if (arguments.Mistakes.Count == 0)
             {
-                bool isInRange = ReportRange(context, each, request);
+                bool isInRange = ReportRange(context, each, request, arguments);
                 ReportTakenNames(context, type, each, request, families, target);
                 if (isAlone && isInRange)
                 {
@@ -54,7 +53,7 @@ internal static class TableCheck
     private static bool ReportCollision(
         SymbolAnalysisContext context, INamedTypeSymbol type, DeclaredFamily declared, IReadOnlyList<DeclaredFamily> all)
     {
-        DeclaredFamily first = all.First(each => each.Family.Shape == declared.Family.Shape);
+        DeclaredFamily first = all.First(each => each.Family.NameSharedWith(declared.Family) is not null);
         if (first.Family != declared.Family)
         {
             Location place = AttributePlace.Of(declared.Attribute, context.CancellationToken);
@@ -66,35 +65,25 @@ internal static class TableCheck
         return false;
     }
 
-    /// <summary>Whether the format can hold the table; that weights round to zero is no hindrance.</summary>
-    private static bool ReportRange(SymbolAnalysisContext context, DeclaredFamily declared, TableRequest request)
+    /// <summary>Whether the table can be made and the format can hold it; that weights round to zero is no hindrance.</summary>
+    private static bool ReportRange(
+        SymbolAnalysisContext context, DeclaredFamily declared, TableRequest request, ArgumentReader arguments)
     {
-        if (request is RuleRequest { DropZeroWeights: false } ruleRequest)
+        try
         {
-            RoundedRule rule = TableMemo.Get(ruleRequest, context.CancellationToken);
-            if (rule.FirstZeroWeightNode is { } first)
+            Mistake? mistake = RangeCheck.Find(request, declared.Family, context.CancellationToken);
+            if (mistake is not null)
             {
-                Report(context, declared, new Mistake(
-                    DiagnosticDescriptors.ZeroWeights,
-                    ArgumentReader.PointsArgument,
-                    rule.ZeroWeights,
-                    rule.Table.Nodes.Count,
-                    rule.Format.Name,
-                    NumberType.Of(rule.Format).Literal(first)));
+                Report(context, declared, mistake);
             }
-        }
-        else if (request is MomentRequest momentRequest)
-        {
-            RoundedMoments moments = TableMemo.Get(momentRequest, context.CancellationToken);
-            if (moments.FirstOverflow is { } order)
-            {
-                Report(context, declared, new Mistake(
-                    DiagnosticDescriptors.MomentOverflow, ArgumentReader.MaximumOrderArgument, order - 1, order, moments.Format.Name));
-                return false;
-            }
-        }
 
-        return true;
+            return mistake is null || mistake.Rule.DefaultSeverity != DiagnosticSeverity.Error;
+        }
+        catch (RuleConstructionException failure)
+        {
+            Report(context, declared, FailedConstruction.MistakeOf(failure, declared.Family, arguments));
+            return false;
+        }
     }
 
     private static void ReportTakenNames(
@@ -105,7 +94,7 @@ internal static class TableCheck
         ImmutableArray<Family> families,
         TargetCapabilities target)
     {
-        TakenMember[] taken = TakenMember.FindIn(type, declared.Family.Shape, families, context.Compilation).ToArray();
+        TakenMember[] taken = TakenMember.FindIn(type, declared.Family, families, context.Compilation).ToArray();
         if (taken.Length == 0 || FilePrinter.Construct(request, target, context.CancellationToken) is not { } part)
         {
             return;
@@ -152,5 +141,5 @@ internal static class TableCheck
 
     private static void Report(SymbolAnalysisContext context, DeclaredFamily declared, Mistake mistake) =>
         context.ReportDiagnostic(Diagnostic.Create(
-            mistake.Rule, AttributePlace.Of(declared.Attribute, mistake.Argument, context.CancellationToken), mistake.Values));
+            mistake.Rule, AttributePlace.Of(declared.Attribute, mistake, context.CancellationToken), mistake.Values));
 }

@@ -5,6 +5,8 @@ using System.Threading;
 using GaussGen.Generator.Declarations;
 using GaussGen.Mathematics.Moments;
 using GaussGen.Mathematics.Requests;
+using GaussGen.Mathematics.Rules;
+using GaussGen.Mathematics.Sequences;
 
 namespace GaussGen.Generator.Emission;
 
@@ -18,20 +20,34 @@ internal static class FilePrinter
         return isPossible ? PrintTable(declaration.Type, table!) : PrintStandIn(declaration);
     }
 
-    /// <summary>Constructs a table and describes its part, or returns <c>null</c> where the format cannot hold it.</summary>
+    /// <summary>Constructs a table and describes its part, or returns <c>null</c> where it cannot be made or the format cannot hold it.</summary>
     public static TablePart? Construct(TableRequest request, TargetCapabilities target, CancellationToken cancellation)
     {
-        switch (request)
+        try
         {
-            case RuleRequest rule:
-                return RulePart.Of(TableMemo.Get(rule, cancellation), target);
-            case MomentRequest moments:
-                RoundedMoments rounded = TableMemo.Get(moments, cancellation);
-                return rounded.FirstOverflow is null ? MomentPart.Of(rounded, target) : null;
-            default:
-                throw new ArgumentException("A request asks for a rule or for moments.", nameof(request));
+            return request switch
+            {
+                RuleRequest rule => PartOf(TableMemo.Get(rule, cancellation), target),
+                MomentRequest moments => PartOf(TableMemo.Get(moments, cancellation), target),
+                SequenceRequest sequences => PartOf(TableMemo.Get(sequences, cancellation), target),
+                _ => throw new ArgumentException("A request asks for a rule, for moments or for lists.", nameof(request)),
+            };
+        }
+        catch (RuleConstructionException)
+        {
+            // The analyzer tells why.
+            return null;
         }
     }
+
+    private static TablePart? PartOf(RoundedRule rule, TargetCapabilities target) =>
+        Enumerable.Range(0, rule.Constants.Count).Any(i => RulePart.IsOutOfRange(rule, i)) ? null : RulePart.Of(rule, target);
+
+    private static TablePart? PartOf(RoundedMoments moments, TargetCapabilities target) =>
+        moments.FirstOverflow is null ? MomentPart.Of(moments, target) : null;
+
+    private static TablePart? PartOf(RoundedSequences sequences, TargetCapabilities target) =>
+        sequences.FirstOverflow is null ? SequencePart.Of(sequences, target) : null;
 
     private static string PrintTable(TargetType type, TablePart part)
     {

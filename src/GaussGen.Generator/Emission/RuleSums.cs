@@ -7,92 +7,58 @@ using static GaussGen.Generator.Emission.TableText;
 
 namespace GaussGen.Generator.Emission;
 
-/// <summary>The sums over a rule: the expectation of a function, and the integral where the weights do not sum to one.</summary>
+/// <summary>
+/// The sums over a rule: the expectation of a function, with an estimate of its error where there is a companion, and the integral
+/// where the weights do not sum to one.
+/// </summary>
 internal static class RuleSums
 {
+    private const string Expectation = "Expectation";
+
     public static IEnumerable<GeneratedMember> Of(RoundedRule rule, NumberType type)
     {
-        IEnumerable<IntegrandForm> forms = IntegrandForm.Both(type);
-        if (rule.Table.LocationScale is not { } locationScale)
+        Carrier carrier = Carrier.Of(rule);
+        IntegrandForm[] forms = IntegrandForm.Both(type).ToArray();
+        foreach (IntegrandForm form in forms)
         {
-            string expectation = $"The expectation of a function of a variable whose density is {rule.Table.Description.Weight}.";
-            return forms.Select(form => Sum("Expectation", expectation, form, rule, type));
+            yield return ExpectationOf(carrier, form, rule, type);
         }
 
-        IEnumerable<GeneratedMember> expectations = forms.Select(form => Expectation(form, rule, type));
-        string integral = $"The integral over the real line of a function times the weight function, which is {rule.Table.Description.Weight}.";
-        return IsOne(locationScale.TotalWeight)
-            ? expectations
-            : expectations.Concat(forms.Select(form => Sum("Integral", integral, form, rule, type)));
+        if (rule.Companion is { } companion)
+        {
+            foreach (IntegrandForm form in forms)
+            {
+                yield return ErrorSum.Of(carrier, form, rule, companion, type);
+            }
+        }
+
+        if (rule.Table.LocationScale is { } family && !IsOne(family.TotalWeight))
+        {
+            foreach (IntegrandForm form in forms)
+            {
+                yield return Integral(form, rule, type);
+            }
+        }
     }
 
-    /// <summary>The sum over the nodes as they stand.</summary>
-    private static GeneratedMember Sum(string name, string summary, IntegrandForm form, RoundedRule rule, NumberType type) =>
-        new(name, form.SignatureAfter(Array.Empty<string>()), writer =>
-        {
-            writer.Summary(Documentation.Escape(summary));
-            DocumentTypeParameter(writer, form);
-            DocumentIntegrand(writer);
-            writer.Returns($"The sum Σ wᵢ f(xᵢ) over the nodes; {Exactness(rule)}.");
-            DocumentNull(writer, form);
-            form.WriteHeader(writer, name, string.Empty, type);
-            using (writer.Block())
-            {
-                writer.Line($"return {Evaluation(rule)}(Nodes, Weights, {type.Zero}, {type.One}, integrand);");
-            }
-        });
+    /// <summary>What the expectation of a function is, for the documentation.</summary>
+    public static string Exactness(RoundedRule rule) =>
+        $"exact, apart from rounding, for polynomials up to degree {Text(rule.Table.DegreeOfExactness)}";
 
-    /// <summary>The sum over the nodes, carried to a mean and a standard deviation.</summary>
-    private static GeneratedMember Expectation(IntegrandForm form, RoundedRule rule, NumberType type) =>
-        new("Expectation", form.SignatureAfter(new[] { type.Keyword, type.Keyword }), writer =>
-        {
-            writer.Summary("The expectation of a function of a normal variable, by the sum over the nodes.");
-            DocumentTypeParameter(writer, form);
-            writer.Parameter("mean", "The mean of the variable.");
-            writer.Parameter("standardDeviation", "Its standard deviation, in the units of the mean; finite, and 0 or above.");
-            DocumentIntegrand(writer);
-            writer.Returns($"The expectation; {Exactness(rule)}. At standard deviation 0 it is the value of the function at the mean.");
-            writer.Throws("global::System.ArgumentOutOfRangeException", "The standard deviation is negative, NaN or infinite.");
-            DocumentNull(writer, form);
-            form.WriteHeader(writer, "Expectation", $"{type.Keyword} mean, {type.Keyword} standardDeviation, ", type);
-            using (writer.Block())
-            {
-                writer.Line("global::GaussGen.Require.StandardDeviation(standardDeviation);");
-                WriteLocatedSum(writer, rule, type);
-            }
-        });
+    public static bool IsOne(RealNumber number) => number.ExactValue is { } value && value == Rational.One;
 
-    private static void WriteLocatedSum(SourceWriter writer, RoundedRule rule, NumberType type)
-    {
-        string scale = "standardDeviation";
-        if (rule.NodeScale is { } nodeScale && !IsOne(rule.Table.LocationScale!.NodeScale))
-        {
-            scale = "scale";
-            writer.Line($"{type.Keyword} scale = {type.Literal(nodeScale)} * standardDeviation; // {type.Hexadecimal(nodeScale)}");
-        }
-
-        string factor = string.Empty;
-        if (rule.ReciprocalTotalWeight is { } reciprocal && !IsOne(rule.Table.LocationScale!.TotalWeight))
-        {
-            factor = "reciprocalTotalWeight, ";
-            writer.Line($"const {type.Keyword} reciprocalTotalWeight = {type.Literal(reciprocal)}; // {type.Hexadecimal(reciprocal)}");
-        }
-
-        writer.Line($"return {Evaluation(rule)}(Nodes, Weights, mean, {scale}, {factor}integrand);");
-    }
-
-    private static void DocumentTypeParameter(SourceWriter writer, IntegrandForm form)
+    public static void DocumentFunction(SourceWriter writer, IntegrandForm form, Carrier carrier, string calls)
     {
         if (form.IsGeneric)
         {
             writer.TypeParameter("TIntegrand", "The type of the function; a struct is compiled into the loop over the nodes.");
         }
+
+        carrier.DocumentParameters(writer);
+        writer.Parameter("integrand", $"The function; it is called once for each node{calls}, and what it throws reaches the caller.");
     }
 
-    private static void DocumentIntegrand(SourceWriter writer) =>
-        writer.Parameter("integrand", "The function; it is called once for each node, and what it throws reaches the caller.");
-
-    private static void DocumentNull(SourceWriter writer, IntegrandForm form)
+    public static void DocumentNull(SourceWriter writer, IntegrandForm form)
     {
         if (!form.IsGeneric)
         {
@@ -100,11 +66,46 @@ internal static class RuleSums
         }
     }
 
-    private static string Exactness(RoundedRule rule) =>
-        $"exact, apart from rounding, for polynomials up to degree {Text(rule.Table.DegreeOfExactness)}";
+    private static GeneratedMember ExpectationOf(Carrier carrier, IntegrandForm form, RoundedRule rule, NumberType type)
+    {
+        SumHead head = new(Expectation, carrier.Parameters);
+        return new GeneratedMember(head.Name, form.SignatureOf(head, type), writer =>
+        {
+            writer.Summary(Documentation.Escape(carrier.IsFixed
+                ? $"The expectation of a function of {rule.Table.Description.Variable}."
+                : $"The expectation of a function of {rule.Table.Description.Variable}, by the sum over the nodes."));
+            DocumentFunction(writer, form, carrier, string.Empty);
+            writer.Returns(carrier.IsFixed
+                ? $"The sum Σ wᵢ f(xᵢ) over the nodes; {Exactness(rule)}."
+                : $"The expectation; {Exactness(rule)}. {carrier.AtZero}");
+            carrier.DocumentRefusal(writer);
+            DocumentNull(writer, form);
+            form.WriteHeader(writer, head, type);
+            using (writer.Block())
+            {
+                carrier.WriteCheck(writer);
+                carrier.WriteSum(writer, type, "return ", rule.Table.IsSymmetric, string.Empty);
+            }
+        });
+    }
 
-    private static string Evaluation(RoundedRule rule) =>
-        "global::GaussGen.RuleEvaluation." + (rule.Table.IsSymmetric ? "Symmetric" : "General");
-
-    private static bool IsOne(RealNumber number) => number.ExactValue is { } value && value == Rational.One;
+    /// <summary>The sum over the nodes as they stand.</summary>
+    private static GeneratedMember Integral(IntegrandForm form, RoundedRule rule, NumberType type)
+    {
+        SumHead head = new("Integral", Array.Empty<string>());
+        Carrier asTheyStand = Carrier.Fixed;
+        return new GeneratedMember(head.Name, form.SignatureOf(head, type), writer =>
+        {
+            writer.Summary(Documentation.Escape(
+                $"The integral over the real line of a function times the weight function, which is {rule.Table.Description.Weight}."));
+            DocumentFunction(writer, form, asTheyStand, string.Empty);
+            writer.Returns($"The sum Σ wᵢ f(xᵢ) over the nodes; {Exactness(rule)}.");
+            DocumentNull(writer, form);
+            form.WriteHeader(writer, head, type);
+            using (writer.Block())
+            {
+                asTheyStand.WriteSum(writer, type, "return ", rule.Table.IsSymmetric, string.Empty);
+            }
+        });
+    }
 }

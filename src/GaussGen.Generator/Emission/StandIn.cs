@@ -19,31 +19,52 @@ internal static class StandIn
     private const string Throw =
         "throw new global::System.NotSupportedException(\"The declaration of this table has a mistake that the compiler reports.\");";
 
-    private static readonly string[] Location = { "mean", "standardDeviation" };
+    /// <summary>Every sum that a rule can have, with and without a location and a scale.</summary>
+    private static readonly SumHead[] Sums =
+    {
+        new("Expectation", Carrier.Location),
+        new("Expectation", Carrier.Scale),
+        new("Expectation", Array.Empty<string>()),
+        new("Integral", Array.Empty<string>()),
+        new(ErrorSum.Name, Carrier.Location, HasError: true),
+        new(ErrorSum.Name, Carrier.Scale, HasError: true),
+        new(ErrorSum.Name, Array.Empty<string>(), HasError: true),
+    };
 
     public static TablePart For(Declaration declaration)
     {
         NumberType type = NumberType.Of(declaration.Request.Format);
         IEnumerable<GeneratedMember> members = declaration.Request switch
         {
-            RuleRequest => RuleMembers(type),
+            RuleRequest => RuleMembers(type, declaration.OwnNames),
             MomentRequest => MomentMembers(type, Math.Min(Math.Max(declaration.OrderAsWritten, 0), HighestOrder)),
-            _ => throw new ArgumentException("A request asks for a rule or for moments.", nameof(declaration)),
+            SequenceRequest => declaration.OwnNames.Select(name => Span(name, type)),
+            _ => throw new ArgumentException("A request asks for a rule, for moments or for lists.", nameof(declaration)),
         };
         return new TablePart("A stand-in for a table whose declaration has a mistake.", Array.Empty<string>(), members.ToArray());
     }
 
-    private static IEnumerable<GeneratedMember> RuleMembers(NumberType type)
+    private static IEnumerable<GeneratedMember> RuleMembers(NumberType type, IEnumerable<string> constants)
     {
         yield return Constant("PointCount", "int", "1");
         yield return Constant("DegreeOfExactness", "int", "1");
-        yield return Span("Nodes", type);
-        yield return Span("Weights", type);
+        foreach (string constant in constants)
+        {
+            yield return Constant(constant, type.Keyword, type.One);
+        }
+
+        foreach (string prefix in new[] { string.Empty, ErrorSum.CompanionPrefix })
+        {
+            yield return Span(prefix + "Nodes", type);
+            yield return Span(prefix + "Weights", type);
+        }
+
         foreach (IntegrandForm form in IntegrandForm.Both(type))
         {
-            yield return Sum("Expectation", type, Location, form);
-            yield return Sum("Expectation", type, Array.Empty<string>(), form);
-            yield return Sum("Integral", type, Array.Empty<string>(), form);
+            foreach (SumHead head in Sums)
+            {
+                yield return Sum(head, type, form);
+            }
         }
     }
 
@@ -75,11 +96,10 @@ internal static class StandIn
         }
     });
 
-    private static GeneratedMember Sum(string name, NumberType type, string[] location, IntegrandForm form) =>
-        new(name, form.SignatureAfter(location.Select(_ => type.Keyword)), writer =>
+    private static GeneratedMember Sum(SumHead head, NumberType type, IntegrandForm form) =>
+        new(head.Name, form.SignatureOf(head, type), writer =>
         {
-            string parameters = string.Concat(location.Select(parameter => $"{type.Keyword} {parameter}, "));
-            form.WriteHeader(writer, name, parameters, type);
+            form.WriteHeader(writer, head, type);
             using (writer.Block())
             {
                 writer.Line(Throw);

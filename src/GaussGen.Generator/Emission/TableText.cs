@@ -71,6 +71,13 @@ internal static class TableText
             : $"no enclosure is wider than 2^{Text(widths.Max())} ulp";
     }
 
+    /// <summary>"1 node", "2 nodes".</summary>
+    public static string Count(int number, string noun) => Text(number) + " " + noun + (number == 1 ? string.Empty : "s");
+
+    /// <summary>How exact the entries of a list are and what they take: a remark on the list.</summary>
+    public static string EntryRemark(IReadOnlyList<RoundedValue> values, NumberType type) =>
+        $"Each is the {type.Format.Name} value nearest to the true one ({Widths(values)}). {Text(values.Count * type.Bytes)} bytes.";
+
     public static string Text(int number) => number.ToString(CultureInfo.InvariantCulture);
 
     private static bool IsNegative(string number) => number[0] == '-';

@@ -9,7 +9,11 @@ namespace GaussGen.Mathematics.Rules;
 /// <param name="Nodes">What the nodes are: "the zeros of the Hermite polynomial He₃".</param>
 /// <param name="Method">How the entries were enclosed, for the remarks on the proof.</param>
 /// <param name="Sources">Where the formulas come from: author, year or publication, number.</param>
-public sealed record RuleDescription(string Title, string Weight, string Nodes, string Method, string Sources);
+public sealed record RuleDescription(string Title, string Weight, string Nodes, string Method, string Sources)
+{
+    /// <summary>The variable whose expectations the rule gives, as a noun phrase: "a normal variable".</summary>
+    public string Variable { get; init; } = "a variable whose density is " + Weight;
+}
 
 /// <summary>
 /// How a rule's weight function is carried to a distribution with a location and a scale:

@@ -59,7 +59,7 @@ public sealed class RangeTests
         Assert.Equal(DiagnosticSeverity.Error, only.Severity); // as the project treats warnings
         Assert.Equal(DiagnosticSeverity.Warning, only.DefaultSeverity);
         Assert.StartsWith(
-            $"{rule.Weights.Count(weight => weight.Bits == 0)} of the {points} weights round to zero in {binary.Name}, those of the nodes of magnitude "
+            $"{rule.Weights.Count(weight => weight.Bits == 0)} of the {points} weights round to zero in {binary.Name}, those of nodes of magnitude "
                 + ShortestDecimal.Write(innermost.Bits, binary),
             only.GetMessage(CultureInfo.InvariantCulture),
             StringComparison.Ordinal);

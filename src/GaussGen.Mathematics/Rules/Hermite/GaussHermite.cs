@@ -132,6 +132,9 @@ public static class GaussHermite
             isProbabilist ? "the standard normal density" : "exp(−x²)",
             "the zeros of the Hermite polynomial " + (isProbabilist ? "He" : "H") + degree,
             count + (points == 1 ? " root interval" : " disjoint root intervals"),
-            Sources);
+            Sources)
+        {
+            Variable = "a normal variable",
+        };
     }
 }
