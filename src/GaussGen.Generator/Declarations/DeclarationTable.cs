@@ -2,6 +2,7 @@ using System.Collections.Immutable;
 using GaussGen.Mathematics.Moments;
 using GaussGen.Mathematics.Requests;
 using GaussGen.Mathematics.Rules;
+using GaussGen.Mathematics.Sequences;
 
 namespace GaussGen.Generator.Declarations;
 
@@ -47,5 +48,25 @@ internal static class DeclarationTable
             read.Finite("mean"),
             read.Positive("standardDeviation"),
             read.MaximumOrder(NormalMomentsRequest.LargestOrder),
-            read.Format())));
+            read.Format())),
+        Family.OfMoments("LogNormalMoments", read => new LogNormalMomentsRequest(
+            read.Finite("logMean"),
+            read.Positive("logStandardDeviation"),
+            read.MaximumOrder(LogNormalMomentsRequest.LargestOrder),
+            read.Format())),
+        Family.OfSequences(
+            "HalfIntegerGamma",
+            read => new HalfIntegerGammaRequest(
+                read.Size("maximumOrder", HalfIntegerGammaRequest.SmallestOrder, HalfIntegerGammaRequest.LargestOrder), read.Format()),
+            sizeArgument: "maximumOrder",
+            "Gamma",
+            "Reciprocal"),
+        Family.OfSequences(
+            "OscillatorMatrixElements",
+            read => new OscillatorMatrixElementsRequest(
+                read.Size("size", OscillatorMatrixElementsRequest.MinimumSize, OscillatorMatrixElementsRequest.MaximumSize),
+                read.Size("power", OscillatorMatrixElementsRequest.MinimumPower, OscillatorMatrixElementsRequest.MaximumPower),
+                read.Format()),
+            sizeArgument: "power",
+            "Elements"));
 }

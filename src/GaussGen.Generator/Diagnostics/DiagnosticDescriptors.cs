@@ -188,11 +188,14 @@ internal static class DiagnosticDescriptors
 
     public static readonly DiagnosticDescriptor RoundingNotDecided = Failure("GAUSS035", "The rounding of an entry cannot be decided");
 
+    public static readonly DiagnosticDescriptor MomentNotRepresentable = Failure("GAUSS036", "A moment is too large for any number format");
+
     public static ImmutableArray<DiagnosticDescriptor> All { get; } = ImmutableArray.Create(
         NotPartial, Generic, FileLocal, PointsOutOfRange, CollidingTables, NameTaken, NotFinite, NotPositive, OrderOutOfRange, Undefined,
         MomentOverflow, ZeroWeights, LanguageVersion, NotAsReviewed, NoBaseline, EmptyInterval, NotANumber, WholeLine, ValueCount, UnequalCounts,
         NotAWeight, NoWeight, LeadingCoefficient, ExponentOutOfRange, LevelOutOfRange, SizeOutOfRange, ConstantOutOfRange, EntryOverflow,
-        MassTooSmall, WeightNotRepresentable, NodeNotRepresentable, NotDetermined, CompanionOutsideInterval, NoCompanion, RoundingNotDecided);
+        MassTooSmall, WeightNotRepresentable, NodeNotRepresentable, NotDetermined, CompanionOutsideInterval, NoCompanion, RoundingNotDecided,
+        MomentNotRepresentable);
 
     /// <summary>What makes a construction fail though each argument is in its range; the mathematics says what to change.</summary>
     private static DiagnosticDescriptor Failure(string id, string title) =>

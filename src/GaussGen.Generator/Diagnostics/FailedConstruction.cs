@@ -22,6 +22,7 @@ internal static class FailedConstruction
             RuleFailure.RecurrenceNotDetermined => (DiagnosticDescriptors.NotDetermined, family.SizeArgument),
             RuleFailure.CompanionOutsideInterval => (DiagnosticDescriptors.CompanionOutsideInterval, ArgumentReader.ErrorEstimateArgument),
             RuleFailure.NoCompanion => (DiagnosticDescriptors.NoCompanion, ArgumentReader.ErrorEstimateArgument),
+            RuleFailure.MomentNotRepresentable => (DiagnosticDescriptors.MomentNotRepresentable, family.SizeArgument),
             RuleFailure.RoundingNotDecided => (DiagnosticDescriptors.RoundingNotDecided, string.Empty),
             _ => throw new ArgumentOutOfRangeException(nameof(failure), failure.Failure, "Each failure has its diagnostic."),
         };

@@ -20,6 +20,9 @@ public static class Samples
             "GaussNormalMixture(5, new[] { 0.9, 0.1 }, new[] { 4, 3.2 }, new[] { 0.05 })"),
         ("GaussEvenExponential(5, -2, 1)", "GaussEvenExponential(5, 1, -2)"),
         ("NormalMoments(0, 1, MaximumOrder = 9)", "NormalMoments(0, -1, MaximumOrder = 9)"),
+        ("LogNormalMoments(0, 0.25, MaximumOrder = 9)", "LogNormalMoments(0, -1, MaximumOrder = 9)"),
+        ("HalfIntegerGamma(10)", "HalfIntegerGamma(201)"),
+        ("OscillatorMatrixElements(4, 3)", "OscillatorMatrixElements(4, -1)"),
     ];
 
     /// <summary>Rules beside Gauss–Hermite.</summary>
@@ -31,6 +34,19 @@ public static class Samples
         "GaussLogNormal(4, 0, 0.25)",
         "GaussNormalMixture(5, new[] { 0.9, 0.1 }, new[] { 4, 3.2 }, new[] { 0.05, 0.2 })",
         "GaussEvenExponential(5, -2, 1)",
+    ];
+
+    /// <summary>Moments beside those of the normal distribution.</summary>
+    public static readonly ImmutableArray<string> OtherMoments =
+    [
+        "LogNormalMoments(0, 0.25)",
+    ];
+
+    /// <summary>Tables that are lists.</summary>
+    public static readonly ImmutableArray<string> Sequences =
+    [
+        "HalfIntegerGamma(10)",
+        "OscillatorMatrixElements(4, 3)",
     ];
 
     /// <summary>Rules whose outermost weights round to zero in binary32.</summary>
