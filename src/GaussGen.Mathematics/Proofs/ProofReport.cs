@@ -101,6 +101,18 @@ internal sealed class ProofReport(TableClaim claim, TableData data)
         }
     }
 
+    /// <summary>Leaves the entries of a span without a verdict.</summary>
+    public void Undecided(string member, IReadOnlyList<ulong> found, string reason)
+    {
+        for (int index = 0; index < found.Count; index++)
+        {
+            _entries.Add(new EntryProof(member, index, IsInteger: false, Verdict.Unproven, found[index], null, 0, reason));
+        }
+    }
+
+    /// <summary>Notes a way in which the data breaks the promise that no single entry shows.</summary>
+    public void Fault(string sentence) => _faults.Add(sentence);
+
     /// <summary>The proof, with everything that was collected.</summary>
     public TableProof Finish(IReadOnlyList<MomentEquation> equations) => new(claim, _entries, _faults, equations);
 
