@@ -8,6 +8,7 @@ using GaussGen.Mathematics.Formats;
 using GaussGen.Mathematics.Moments;
 using GaussGen.Mathematics.Requests;
 using GaussGen.Mathematics.Rules;
+using GaussGen.Mathematics.Sequences;
 using Microsoft.CodeAnalysis;
 using Microsoft.CodeAnalysis.Diagnostics;
 
@@ -51,18 +52,33 @@ internal static class BaselineCheck
                 return MembersOf(TableMemo.Get(rule, cancellation));
             case MomentRequest moments:
                 return MembersOf(TableMemo.Get(moments, cancellation));
+            case SequenceRequest sequences:
+                return MembersOf(TableMemo.Get(sequences, cancellation));
             default:
-                throw new ArgumentException("A request asks for a rule or for moments.", nameof(request));
+                throw new ArgumentException("A request asks for a rule, for moments or for sequences.", nameof(request));
         }
     }
 
-    private static DigestedMember[] MembersOf(RoundedRule rule) => new[]
+    private static IEnumerable<DigestedMember> MembersOf(RoundedRule rule)
     {
-        List("Nodes", rule.Format, rule.Nodes),
-        List("Weights", rule.Format, rule.Weights),
-        DigestedMember.Number("PointCount", null, (ulong)rule.Nodes.Count),
-        DigestedMember.Number("DegreeOfExactness", null, (ulong)rule.Table.DegreeOfExactness),
-    };
+        yield return List("Nodes", rule.Format, rule.Nodes);
+        yield return List("Weights", rule.Format, rule.Weights);
+        yield return DigestedMember.Number("PointCount", null, (ulong)rule.Nodes.Count);
+        yield return DigestedMember.Number("DegreeOfExactness", null, (ulong)rule.Table.DegreeOfExactness);
+        for (int i = 0; i < rule.Constants.Count; i++)
+        {
+            yield return DigestedMember.Number(rule.Table.Constants[i].Name, rule.Format, rule.Constants[i].Bits);
+        }
+
+        if (rule.Companion is { } companion)
+        {
+            yield return List("CompanionNodes", rule.Format, companion.Nodes);
+            yield return List("CompanionWeights", rule.Format, companion.Weights);
+        }
+    }
+
+    private static IEnumerable<DigestedMember> MembersOf(RoundedSequences sequences) => sequences.Table.Sequences.Select((sequence, index) =>
+        List(sequence.Name, sequences.Format, sequences.Values[index]));
 
     private static IEnumerable<DigestedMember> MembersOf(RoundedMoments moments)
     {

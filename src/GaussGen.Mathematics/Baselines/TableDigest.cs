@@ -33,8 +33,9 @@ public sealed record DigestedMember(string Name, BinaryFormat? Format, IReadOnly
 /// It is the SHA-256 digest of lines of ASCII text, each ended by a line feed: "Nodes[0] binary64 bff0000000000000", the member,
 /// its format and the bits in as many lower-case digits as the format has; "PointCount int32 00000002" for an integer. Members are
 /// in ordinal order, the entries of one in the order of their indices. Covered are Nodes, Weights, PointCount and
-/// DegreeOfExactness of a rule, and of moments Raw, Central, Absolute and the constants that repeat their entries. Constants that
-/// are only in the code of a sum follow from these and are left to the proof.
+/// DegreeOfExactness of a rule, CompanionNodes and CompanionWeights where it has an estimate of its error, and
+/// NormalizingIntegral of an even exponential; of moments Raw, Central, Absolute and the constants that repeat their entries; and
+/// the lists of a table that is neither. Constants that are only in the code of a sum follow from these and are left to the proof.
 /// </remarks>
 public static class TableDigest
 {
