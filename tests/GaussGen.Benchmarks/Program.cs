@@ -13,4 +13,10 @@ if (args is ["accuracy"])
     return;
 }
 
+if (args is ["families"])
+{
+    FamilyTimes.Run();
+    return;
+}
+
 BenchmarkSwitcher.FromAssembly(typeof(ConstructionBenchmarks).Assembly).Run(args);

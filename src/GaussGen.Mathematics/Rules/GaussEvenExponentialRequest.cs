@@ -64,7 +64,7 @@ public sealed record GaussEvenExponentialRequest : RuleRequest
             "the density proportional to " + function,
             "Trefethen and Weideman 2014, theorem 5.1; NIST DLMF 18.9.1");
         RealNumber integral = RealNumber.FromEnclosures(weight.NormalizingIntegral);
-        return UniversalRule.Construct(weight, Points, words, cancellation) with
+        return UniversalRule.Construct(weight, Points, words, ErrorEstimate, cancellation) with
         {
             Constants = [new NamedConstant("NormalizingIntegral", integral, "The integral of " + function + " over the real line.")],
         };

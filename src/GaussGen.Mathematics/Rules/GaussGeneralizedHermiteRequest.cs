@@ -67,5 +67,6 @@ public sealed record GaussGeneralizedHermiteRequest : RuleRequest
             "Generalized Gauss–Hermite rule",
             "the density proportional to |x|^(2·" + Parameters.Write(Exponent) + ") exp(−x²)",
             "Szegő, Orthogonal Polynomials (1939), problem 25; Chihara, An Introduction to Orthogonal Polynomials (1978), V.2"),
+        ErrorEstimate,
         cancellation);
 }

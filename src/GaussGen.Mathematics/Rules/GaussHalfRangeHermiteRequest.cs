@@ -38,6 +38,7 @@ public sealed record GaussHalfRangeHermiteRequest : RuleRequest
         new HalfRangeWeight(),
         Points,
         new FamilyWords("Half-range Gauss–Hermite rule", "the half-normal density on [0, ∞)", "Steen, Byrne and Gelbard 1969"),
+        ErrorEstimate,
         cancellation) with
     {
         LocationScale = new LocationScale(RealNumber.Exact(1), RealNumber.Exact(1)) { HasLocation = false },

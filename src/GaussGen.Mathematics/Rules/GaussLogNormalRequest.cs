@@ -71,13 +71,18 @@ public sealed record GaussLogNormalRequest : RuleRequest
             "Gauss rule",
             "the log-normal density with log-mean " + Parameters.Write(LogMean) + " and log-standard-deviation " + Parameters.Write(LogStandardDeviation),
             "Wigert 1923; Chihara, An Introduction to Orthogonal Polynomials (1978), VI.2");
-        RuleTable table = UniversalRule.Construct(new LogNormalWeight(mean, deviation, Points), Points, words, cancellation);
-        return table.Nodes[0].Enclose(Rounding.FirstPrecision, cancellation).Upper < new Dyadic(1, -1022) ? throw NodeOutOfRange() : table;
+        RuleTable table = UniversalRule.Construct(
+            new LogNormalWeight(mean, deviation, Points), Points, words, ErrorEstimate, cancellation);
+        // The smallest node of all: a companion's lies below the rule's own.
+        RealNumber first = (table.Companion?.Nodes ?? table.Nodes)[0];
+        return first.Enclose(Rounding.FirstPrecision, cancellation).Upper < new Dyadic(1, -1022) ? throw NodeOutOfRange() : table;
     }
 
     /// <summary>
     /// Refuses what is out of range for sure before any work. With m = 0: xₙ ≥ aₙ₋₁ ≥ Q^(2n−3/2), and wₙ xₙ^(2n−1) ≤ E X^(2n−1) = Q^((2n−1)²/2), so that
-    /// ln wₙ ≤ −s² (2n−1)(n−1). For all m: ln xₙ ≥ m + (2n − 3/2) s² and ln x₁ ≤ ln a₀ = m + s²/2.
+    /// ln wₙ ≤ −s² (2n−1)(n−1). For all m: ln xₙ ≥ m + (2n − 3/2) s² and ln x₁ ≤ ln a₀ = m + s²/2. The outermost node x of an anti-Gaussian
+    /// companion is at least aₙ ≥ Q^(2n+1/2), and its weight w times x²ⁿ at most 2 E X²ⁿ = 2 Q^(2n²), as the companion's sum and that of the rule,
+    /// which is not negative, have that sum; so that ln w ≤ ln 2 − s² n(2n+1).
     /// </summary>
     private void RequireRange(Rational mean, Rational variance)
     {
@@ -89,13 +94,25 @@ public sealed record GaussLogNormalRequest : RuleRequest
                 "The outermost weight of the rule is below 2^-1022, the smallest normal binary64 number; ask for fewer points or a smaller log-standard-deviation.");
         }
 
-        if (mean + (variance * new Rational((4 * Points) - 3, 2)) > 710 || mean + (variance / 2) < -709)
+        if (ErrorEstimate && variance * (Points * ((2 * Points) + 1)) > 710)
+        {
+            throw new RuleConstructionException(
+                RuleFailure.WeightNotRepresentable,
+                "The outermost weight of the error estimate's companion rule is below 2^-1022, the smallest normal binary64 number; "
+                + "ask for fewer points, a smaller log-standard-deviation or no error estimate.");
+        }
+
+        int last = ErrorEstimate ? (4 * Points) + 1 : (4 * Points) - 3;
+        if (mean + (variance * new Rational(last, 2)) > 710 || mean + (variance / 2) < -709)
         {
             throw NodeOutOfRange();
         }
     }
 
-    private static RuleConstructionException NodeOutOfRange() => new(
+    private RuleConstructionException NodeOutOfRange() => new(
         RuleFailure.NodeNotRepresentable,
-        "The outermost node of the rule is not a normal binary64 number; ask for fewer points, or for a log-mean nearer to zero.");
+        ErrorEstimate
+            ? "The outermost node of the rule or of its error estimate's companion is not a normal binary64 number; ask for fewer points, for a "
+                + "log-mean nearer to zero, or for no error estimate."
+            : "The outermost node of the rule is not a normal binary64 number; ask for fewer points, or for a log-mean nearer to zero.");
 }

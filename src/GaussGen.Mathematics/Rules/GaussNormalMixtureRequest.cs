@@ -88,6 +88,6 @@ public sealed record GaussNormalMixtureRequest : RuleRequest
             Parameters.Write(Means),
             Parameters.Write(StandardDeviations));
         return UniversalRule.Construct(
-            new NormalMixtureWeight(components), Points, new FamilyWords("Gauss rule", density, "Stein 1981"), cancellation);
+            new NormalMixtureWeight(components), Points, new FamilyWords("Gauss rule", density, "Stein 1981"), ErrorEstimate, cancellation);
     }
 }

@@ -70,7 +70,7 @@ public sealed record GaussTruncatedNormalRequest : RuleRequest
             "Gauss rule",
             "the standard normal density on " + TruncatedNormalParameters.Write(Lower, Upper),
             "NIST DLMF 7.6.2; Tallis 1961 for the moments");
-        return UniversalRule.Construct(new TruncatedNormalWeight(lower, upper, Points), Points, words, cancellation);
+        return UniversalRule.Construct(new TruncatedNormalWeight(lower, upper, Points), Points, words, ErrorEstimate, cancellation);
     }
 }
 

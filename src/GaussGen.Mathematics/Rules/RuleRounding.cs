@@ -26,7 +26,7 @@ public static class RuleRounding
     {
         RoundedValue[] weights = RoundAll(table.Weights, table.IsSymmetric, negated: false, format, cancellation);
         RoundedValue[] nodes = RoundAll(table.Nodes, table.IsSymmetric, negated: true, format, cancellation);
-        RequireFinite(nodes, format);
+        RequireFinite(nodes, format, "the rule", "; ask for fewer points, or for a weight of a smaller extent.");
         int zeroWeights = CountZeros(nodes, weights, format, out RoundedValue? first);
         if (dropZeroWeights && zeroWeights > 0)
         {
@@ -54,7 +54,8 @@ public static class RuleRounding
     {
         RoundedValue[] weights = RoundAll(table.Weights, table.IsSymmetric, negated: false, format, cancellation);
         RoundedValue[] nodes = RoundAll(table.Nodes, table.IsSymmetric, negated: true, format, cancellation);
-        RequireFinite(nodes, format);
+        RequireFinite(
+            nodes, format, "the error estimate's companion rule", "; ask for fewer points, for a weight of a smaller extent, or for no error estimate.");
         if (dropZeroWeights)
         {
             (nodes, weights) = DropZeros(nodes, weights, format);
@@ -63,13 +64,12 @@ public static class RuleRounding
         return new RoundedCompanion(table, nodes, weights, Rounding.Nearest(RealNumber.Exact(table.Factor), format, cancellation));
     }
 
-    private static void RequireFinite(RoundedValue[] nodes, BinaryFormat format)
+    private static void RequireFinite(RoundedValue[] nodes, BinaryFormat format, string rule, string advice)
     {
         if (Array.Exists(nodes, node => format.IsInfinity(node.Bits)))
         {
             throw new RuleConstructionException(
-                RuleFailure.NodeNotRepresentable,
-                "A node of the rule is too large for " + format.Name + "; ask for fewer points, or for a weight of a smaller extent.");
+                RuleFailure.NodeNotRepresentable, "A node of " + rule + " is too large for " + format.Name + advice);
         }
     }
 

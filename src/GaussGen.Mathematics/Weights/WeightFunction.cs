@@ -17,6 +17,9 @@ internal abstract class WeightFunction
     /// <summary>Whether the weight is symmetric about y = 0.</summary>
     internal virtual bool IsEven => false;
 
+    /// <summary>Whether the weight is symmetric about x = 0.</summary>
+    internal bool IsSymmetricOnLine => IsEven && ToLineExactly(Rational.Zero) is { IsZero: true };
+
     /// <summary>
     /// Whether the Jacobi matrix grows so fast from row to row that the smallest nodes are far below its norm; then the starting
     /// points are sought with high relative accuracy.

@@ -166,4 +166,5 @@ def main():
             sys.stdout.flush()
 
 
-main()
+if __name__ == "__main__":
+    main()

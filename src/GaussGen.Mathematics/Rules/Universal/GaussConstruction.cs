@@ -8,7 +8,11 @@ namespace GaussGen.Mathematics.Rules.Universal;
 /// <summary>All nodes and weights of a rule at one precision, in the coordinate y of the weight function.</summary>
 /// <param name="Nodes">The nodes, ascending; of an even weight the upper half is enclosed and the lower one is its mirror image.</param>
 /// <param name="Weights">The weights, which sum to 1.</param>
-internal sealed record GaussEnclosures(Ball[] Nodes, Ball[] Weights);
+internal sealed record GaussEnclosures(Ball[] Nodes, Ball[] Weights)
+{
+    /// <summary>The same with the nodes in the variable of which the weight function's moments are the moments.</summary>
+    internal GaussEnclosures ForMomentsOf(WeightFunction weight) => this with { Nodes = Array.ConvertAll(Nodes, weight.ToMomentCoordinate) };
+}
 
 /// <summary>From a recurrence to certified nodes and weights.</summary>
 internal static class GaussConstruction

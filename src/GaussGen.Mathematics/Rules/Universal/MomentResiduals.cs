@@ -1,7 +1,6 @@
 using System;
 using System.Threading;
 using GaussGen.Mathematics.Arithmetic;
-using GaussGen.Mathematics.Weights;
 
 namespace GaussGen.Mathematics.Rules.Universal;
 
@@ -11,11 +10,11 @@ namespace GaussGen.Mathematics.Rules.Universal;
 /// </summary>
 internal sealed class MomentResiduals
 {
-    private MomentResiduals(Ball[] residuals, Ball[] sizes)
+    private MomentResiduals(Ball[] residuals, Ball[] sizes, int exact)
     {
         Residuals = residuals;
         Bits = int.MaxValue;
-        for (int k = 0; k < residuals.Length; k++)
+        for (int k = 0; k < exact; k++)
         {
             Bound above = Approximation.Magnitude(residuals[k]);
             Bits = above.IsZero ? Bits : Math.Min(Bits, Approximation.FloorLog2(sizes[k].Lower) - above.CeilingLog2);
@@ -25,24 +24,26 @@ internal sealed class MomentResiduals
     /// <summary>The residuals by order.</summary>
     internal Ball[] Residuals { get; }
 
-    /// <summary>The magnitude of every residual is at most 2^−Bits of Σ wᵢ |yᵢ|ᵏ.</summary>
+    /// <summary>The magnitude of every residual that must vanish is at most 2^−Bits of Σ wᵢ |yᵢ|ᵏ.</summary>
     internal int Bits { get; }
 
-    /// <summary>Encloses the residuals of a rule in its weight's coordinate.</summary>
-    /// <param name="nodes">The nodes yᵢ.</param>
-    /// <param name="weights">The weights wᵢ.</param>
-    /// <param name="moments">The moments m₀ … up to the degree of exactness.</param>
-    /// <param name="isEven">Whether nodes and weights are symmetric about 0, so that odd orders vanish.</param>
+    /// <summary>Encloses the residuals of a rule in the variable of the moments.</summary>
+    /// <param name="rule">Nodes yᵢ and weights wᵢ; of an even weight in mirrored pairs.</param>
+    /// <param name="moments">The moments m₀, m₁, …, as many as residuals are wanted.</param>
+    /// <param name="exact">How many of the residuals must vanish: the degree of exactness and one.</param>
+    /// <param name="isEven">Whether nodes and weights are symmetric about 0, so that those of odd order vanish of themselves.</param>
     /// <param name="precision">The working precision.</param>
     /// <param name="cancellation">Looked at for each order.</param>
-    /// <exception cref="InvalidOperationException">A residual is surely not zero: the construction of rule or moments is wrong.</exception>
+    /// <exception cref="InvalidOperationException">
+    /// A residual that must vanish is surely not zero: the construction of rule or moments is wrong.
+    /// </exception>
     internal static MomentResiduals Of(
-        Ball[] nodes, Ball[] weights, Ball[] moments, bool isEven, int precision, CancellationToken cancellation)
+        GaussEnclosures rule, Ball[] moments, int exact, bool isEven, int precision, CancellationToken cancellation)
     {
+        (Ball[] factors, Ball[] terms) = isEven ? UpperHalf(rule, precision) : (rule.Nodes, (Ball[])rule.Weights.Clone());
         var residuals = new Ball[moments.Length];
         var sizes = new Ball[moments.Length];
-        var terms = (Ball[])weights.Clone();
-        for (int k = 0; k < moments.Length; k++)
+        for (int k = 0; k < moments.Length; k += isEven ? 2 : 1)
         {
             cancellation.ThrowIfCancellationRequested();
             Ball sum = default, size = default;
@@ -50,28 +51,33 @@ internal sealed class MomentResiduals
             {
                 sum = Ball.Add(sum, terms[i], precision);
                 size = Ball.Add(size, terms[i].Abs(), precision);
-                terms[i] = Ball.Multiply(terms[i], nodes[i], precision);
+                terms[i] = Ball.Multiply(terms[i], factors[i], precision);
             }
 
-            bool vanishes = isEven && (k & 1) != 0;
             sizes[k] = size;
-            residuals[k] = vanishes ? default : Ball.Subtract(sum, Ball.Divide(moments[k], moments[0], precision), precision);
-            if (!residuals[k].ContainsZero)
+            residuals[k] = Ball.Subtract(sum, Ball.Divide(moments[k], moments[0], precision), precision);
+            if (k < exact && !residuals[k].ContainsZero)
             {
                 throw new InvalidOperationException("A rule does not reproduce a moment that it should; its construction is wrong.");
             }
         }
 
-        return new MomentResiduals(residuals, sizes);
+        return new MomentResiduals(residuals, sizes, exact);
     }
 
-    /// <summary>The residuals of a Gauss rule up to its degree of exactness.</summary>
-    internal static MomentResiduals Of(GaussRule rule, int precision, CancellationToken cancellation)
+    /// <summary>The squares of the nodes from the middle upwards, and the weights of pairs.</summary>
+    private static (Ball[] Squares, Ball[] Weights) UpperHalf(GaussEnclosures rule, int precision)
     {
-        GaussEnclosures enclosures = rule.At(precision, cancellation);
-        WeightFunction weight = rule.Weight;
-        Ball[] moments = weight.Moments(2 * rule.Points, precision, cancellation);
-        Ball[] nodes = Array.ConvertAll(enclosures.Nodes, weight.ToMomentCoordinate);
-        return Of(nodes, enclosures.Weights, moments, weight.IsEven, precision, cancellation);
+        int n = rule.Nodes.Length, first = n / 2;
+        var squares = new Ball[n - first];
+        var weights = new Ball[n - first];
+        for (int i = 0; i < squares.Length; i++)
+        {
+            bool isCentre = (2 * (first + i)) + 1 == n;
+            squares[i] = Ball.Square(rule.Nodes[first + i], precision);
+            weights[i] = isCentre ? rule.Weights[first + i] : rule.Weights[first + i].ScaleByPowerOfTwo(1);
+        }
+
+        return (squares, weights);
     }
 }

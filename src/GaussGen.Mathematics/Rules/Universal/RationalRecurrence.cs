@@ -19,4 +19,12 @@ internal sealed class RationalRecurrence(Rational[] diagonal, Rational[] squares
 
     /// <summary>bₖ for k at least 1.</summary>
     internal Rational Square(int k) => squares[k];
+
+    /// <summary>The same coefficients with twice the last bₖ; there are at least two aₖ.</summary>
+    internal RationalRecurrence DoubleLastSquare()
+    {
+        var changed = (Rational[])squares.Clone();
+        changed[Count - 1] = 2 * changed[Count - 1];
+        return new RationalRecurrence(diagonal, changed, isEven);
+    }
 }

@@ -1,4 +1,5 @@
 using System;
+using System.Linq;
 using System.Threading;
 using GaussGen.Mathematics.Arithmetic;
 
@@ -28,6 +29,19 @@ internal sealed class Recurrence(Ball[] diagonal, Ball[] squares, bool isEven)
     /// <summary>The same coefficients with midpoints of about <paramref name="precision"/> bits.</summary>
     internal Recurrence Trim(int precision) => new(
         Array.ConvertAll(diagonal, ball => ball.Trim(precision)), Array.ConvertAll(squares, ball => ball.Trim(precision)), isEven);
+
+    /// <summary>The first <paramref name="count"/> of the coefficients aₖ, and the bₖ between them.</summary>
+    internal Recurrence Take(int count) => count == Count
+        ? this
+        : new Recurrence([.. Enumerable.Take(diagonal, count)], [.. Enumerable.Take(squares, count)], isEven);
+
+    /// <summary>The same coefficients with twice the last bₖ; there are at least two aₖ.</summary>
+    internal Recurrence DoubleLastSquare()
+    {
+        var changed = (Ball[])squares.Clone();
+        changed[Count - 1] = changed[Count - 1].ScaleByPowerOfTwo(1);
+        return new Recurrence(diagonal, changed, isEven);
+    }
 
     /// <summary>
     /// How many bits of the Jacobi matrix are known in the least known place: of each bₖ relative to itself, of each aₖ relative

@@ -21,33 +21,43 @@ internal static class UniversalRule
     /// <param name="weight">The weight function.</param>
     /// <param name="points">The number of nodes, at least 1.</param>
     /// <param name="words">The words for the documentation.</param>
+    /// <param name="hasErrorEstimate">Whether the rule is to have its anti-Gaussian companion.</param>
     /// <param name="cancellation">Looked at at least every 10 ms.</param>
-    /// <exception cref="RuleConstructionException">The rule cannot be constructed; the exception says why.</exception>
-    internal static RuleTable Construct(WeightFunction weight, int points, FamilyWords words, CancellationToken cancellation)
+    /// <exception cref="RuleConstructionException">The rule or its companion cannot be constructed; the exception says why.</exception>
+    internal static RuleTable Construct(
+        WeightFunction weight, int points, FamilyWords words, bool hasErrorEstimate, CancellationToken cancellation)
     {
-        GaussRule rule = GaussRule.Of(weight, points);
-        RequireRepresentable(rule.At(Formats.Rounding.FirstPrecision, cancellation));
-        MomentResiduals residuals = MomentResiduals.Of(rule, Formats.Rounding.FirstPrecision, cancellation);
+        const int Precision = Formats.Rounding.FirstPrecision;
+        (GaussRule rule, GaussRule? companion) = hasErrorEstimate
+            ? AntiGaussian.WithRule(weight, points)
+            : (GaussRule.Of(weight, points), (GaussRule?)null);
+        GaussEnclosures enclosures = rule.At(Precision, cancellation);
+        RequireRepresentable(
+            enclosures, "A weight of the rule is below 2^-1022, the smallest normal binary64 number; ask for fewer points.");
+        Ball[] moments = weight.Moments((2 * points) + (hasErrorEstimate ? 2 : 0), Precision, cancellation);
+        MomentResiduals residuals = MomentResiduals.Of(
+            enclosures.ForMomentsOf(weight), moments, 2 * points, weight.IsEven, Precision, cancellation);
         return new RuleTable(
             Describe(points, residuals, words),
             rule.Nodes(),
             rule.Weights(),
             (2 * points) - 1,
-            weight.IsEven && weight.ToLineExactly(Rational.Zero) is { IsZero: true },
-            LocationScale: null);
+            weight.IsSymmetricOnLine,
+            LocationScale: null)
+        {
+            Companion = companion is null ? null : AntiGaussian.Describe(companion, moments, residuals, cancellation),
+        };
     }
 
     /// <summary>Throws where a weight is surely below the smallest normal binary64 number.</summary>
-    internal static void RequireRepresentable(GaussEnclosures enclosures)
+    internal static void RequireRepresentable(GaussEnclosures enclosures, string message)
     {
         var least = new Dyadic(1, -1022);
         foreach (Ball weight in enclosures.Weights)
         {
             if (weight.Upper < least)
             {
-                throw new RuleConstructionException(
-                    RuleFailure.WeightNotRepresentable,
-                    "A weight of the rule is below 2^-1022, the smallest normal binary64 number; ask for fewer points.");
+                throw new RuleConstructionException(RuleFailure.WeightNotRepresentable, message);
             }
         }
     }

@@ -92,7 +92,8 @@ public class UniversalRuleTests
             (new HalfRangeWeight(), 12), (new HalfRangeWeight(), 64), (new EvenExponentialWeight([new Dyadic(-2, 0), new Dyadic(1, -1)]), 31),
         })
         {
-            MomentResiduals residuals = MomentResiduals.Of(GaussRule.Of(weight, points), 128, default);
+            GaussEnclosures rule = GaussRule.Of(weight, points).At(128, default).ForMomentsOf(weight);
+            var residuals = MomentResiduals.Of(rule, weight.Moments(2 * points, 128, default), 2 * points, weight.IsEven, 128, default);
             Assert.Equal(2 * points, residuals.Residuals.Length);
             Assert.All(residuals.Residuals, residual => Assert.True(residual.ContainsZero));
             Assert.True(residuals.Bits >= 50, residuals.Bits + " bits");
@@ -108,7 +109,7 @@ public class UniversalRuleTests
         tampered[2] = Ball.Add(tampered[2], Ball.FromDyadic(new Dyadic(1, -60)), 128);
 
         Assert.Throws<InvalidOperationException>(() => MomentResiduals.Of(
-            enclosures.Nodes, tampered, weight.Moments(10, 128, default), isEven: false, 128, default));
+            enclosures with { Weights = tampered }, weight.Moments(10, 128, default), 10, isEven: false, 128, default));
     }
 
     [Fact]
@@ -118,7 +119,7 @@ public class UniversalRuleTests
         GaussEnclosures enclosures = GaussRule.Of(weight, 5).At(128, default);
 
         Assert.Throws<InvalidOperationException>(() => MomentResiduals.Of(
-            enclosures.Nodes, enclosures.Weights, weight.Moments(11, 128, default), isEven: false, 128, default));
+            enclosures, weight.Moments(11, 128, default), 11, isEven: false, 128, default));
     }
 
     [Fact]
