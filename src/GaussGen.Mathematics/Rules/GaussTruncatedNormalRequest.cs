@@ -86,18 +86,24 @@ internal static class TruncatedNormalParameters
 
     /// <summary>Refuses an interval, in units of the standard deviation from the mean, whose probability is surely below 2^−1022.</summary>
     /// <exception cref="RuleConstructionException">The probability is too small.</exception>
-    internal static void RequireMass(Dyadic? lower, Dyadic? upper, CancellationToken cancellation)
+    internal static void RequireMass(Dyadic? lower, Dyadic? upper, CancellationToken cancellation) =>
+        RequireMass(new TruncatedNormalDistribution(Dyadic.Zero, new Dyadic(1, 0), lower, upper), cancellation);
+
+    /// <summary>Refuses a distribution whose interval has a probability that is surely below 2^−1022.</summary>
+    /// <exception cref="RuleConstructionException">The probability is too small.</exception>
+    internal static void RequireMass(TruncatedNormalDistribution distribution, CancellationToken cancellation)
     {
-        // Beyond 39 the whole tail is below exp(−39²/2) < 2^−1097; nothing need be computed there.
-        var far = new Dyadic(39, 0);
-        bool isFar = (lower is { } low && low > far) || (upper is { } high && high < -far);
-        if (isFar || IsTooSmall(TruncatedMoments.About(lower, upper, default, 1, 64, cancellation)[0], cancellation))
+        // Beyond 39 standard deviations the whole tail is below exp(−39²/2) < 2^−1097; nothing need be computed there.
+        if (distribution.IsBeyond(39) || IsTooSmall(Mass(distribution, cancellation), cancellation))
         {
             throw new RuleConstructionException(
                 RuleFailure.MassTooSmall,
                 "The interval has a probability below 2^-1022; choose one that is wider or nearer to the mean.");
         }
     }
+
+    private static Ball Mass(TruncatedNormalDistribution distribution, CancellationToken cancellation) =>
+        TruncatedMoments.About((working, _) => distribution.About(distribution.Mean, working), 1, 64, cancellation)[0];
 
     /// <summary>Whether ∫ exp(−x²/2) dx is surely below √(2π) 2^−1022.</summary>
     private static bool IsTooSmall(Ball integral, CancellationToken cancellation)

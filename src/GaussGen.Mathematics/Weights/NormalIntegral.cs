@@ -12,11 +12,25 @@ internal static class NormalIntegral
     /// <param name="upper">The upper end; <c>null</c> for +∞.</param>
     /// <param name="precision">The working precision.</param>
     /// <param name="cancellation">Looked at in each term of the series.</param>
-    internal static Ball Between(Dyadic? lower, Dyadic? upper, int precision, CancellationToken cancellation)
+    internal static Ball Between(Ball? lower, Ball? upper, int precision, CancellationToken cancellation)
     {
         Ball high = upper is null ? Half(precision, cancellation) : FromZero(upper.Value, precision, cancellation);
         Ball low = lower is null ? Ball.Negate(Half(precision, cancellation)) : FromZero(lower.Value, precision, cancellation);
         return Ball.Subtract(high, low, precision);
+    }
+
+    /// <summary>∫ exp(−t²/2) dt from 0 to each number in a ball.</summary>
+    internal static Ball FromZero(Ball x, int precision, CancellationToken cancellation)
+    {
+        Ball integral = FromZero(x.Center, precision, cancellation);
+        if (x.IsExact)
+        {
+            return integral;
+        }
+
+        // Within the radius the integral changes by at most the radius times the largest density.
+        Ball density = Elementary.Exp(Ball.Square(x, 64).Negate().ScaleByPowerOfTwo(-1), 64, cancellation);
+        return integral.Enlarge(x.Radius * Approximation.Magnitude(density));
     }
 
     /// <summary>∫ exp(−t²/2) dt from 0 to x.</summary>
@@ -34,7 +48,7 @@ internal static class NormalIntegral
 
         int working = precision + 16;
         Ball argument = Ball.FromDyadic(x);
-        Ball square = Ball.FromDyadic((x * x).Reduce());
+        Ball square = Ball.Square(argument, working);
         Ball density = Elementary.Exp(square.Negate().ScaleByPowerOfTwo(-1), working, cancellation);
         if (Approximation.CeilingLog2(density) < -precision && x > new Dyadic(1, 0))
         {
@@ -59,7 +73,7 @@ internal static class NormalIntegral
     }
 
     /// <summary>Whether x²/(2j + 3) is surely at most one half.</summary>
-    private static bool IsPastHalf(Ball square, int index) => square.Center <= new Dyadic((2 * index) + 3, -1);
+    private static bool IsPastHalf(Ball square, int index) => square.Upper <= new Dyadic((2 * index) + 3, -1);
 
     /// <summary>√(π/2).</summary>
     private static Ball Half(int precision, CancellationToken cancellation) =>

@@ -25,22 +25,36 @@ internal static class TruncatedMoments
     /// <summary>The moments with k = 0 … count − 1.</summary>
     /// <param name="lower">a; <c>null</c> for −∞.</param>
     /// <param name="upper">b; <c>null</c> for +∞.</param>
-    /// <param name="centre">c; a ball's radius should be far below what is asked for.</param>
+    /// <param name="centre">c.</param>
     /// <param name="count">How many.</param>
-    /// <param name="precision">The bits to which moments of even order are known at least, as far as the centre allows.</param>
+    /// <param name="precision">The bits to which moments of even order are known at least.</param>
     /// <param name="cancellation">Looked at in each step.</param>
     /// <exception cref="RuleConstructionException">The precision is not reached within the limit.</exception>
     internal static Ball[] About(
-        Dyadic? lower, Dyadic? upper, Ball centre, int count, int precision, CancellationToken cancellation)
+        Dyadic? lower, Dyadic? upper, Dyadic centre, int count, int precision, CancellationToken cancellation)
     {
-        var plan = TruncatedPlan.For(lower, upper, centre, count, precision);
+        var interval = TruncatedInterval.FromExact(lower, upper, centre);
+        return About((_, _) => interval, count, precision, cancellation);
+    }
+
+    /// <summary>The same for an interval and a centre that are known as balls at any precision.</summary>
+    /// <param name="enclose">From a working precision to the interval: the relative radii of its distances fall with it.</param>
+    /// <param name="count">How many.</param>
+    /// <param name="precision">The bits to which moments of even order are known at least.</param>
+    /// <param name="cancellation">Looked at in each step.</param>
+    /// <exception cref="RuleConstructionException">The precision is not reached within the limit.</exception>
+    internal static Ball[] About(
+        Func<int, CancellationToken, TruncatedInterval> enclose, int count, int precision, CancellationToken cancellation)
+    {
+        var plan = TruncatedPlan.For(enclose(64, cancellation), count, precision);
         int working = plan.WorkingPrecision;
         while (working <= MaximumPrecision)
         {
+            TruncatedInterval interval = enclose(working, cancellation);
             Ball[] moments = plan.IsDownward
-                ? Downward(lower!.Value, upper!.Value, centre, count, plan.StepsDown(working), working, cancellation)
-                : Upward(lower, upper, centre, count, working, cancellation);
-            int missing = MissingBits(moments, centre, precision);
+                ? Downward(interval, count, plan.StepsDown(working), working, cancellation)
+                : Upward(interval, count, working, cancellation);
+            int missing = MissingBits(moments, precision);
             if (missing <= 0)
             {
                 return moments;
@@ -53,36 +67,34 @@ internal static class TruncatedMoments
             RuleFailure.RecurrenceNotDetermined,
             string.Format(
                 CultureInfo.InvariantCulture,
-                "The moments of the interval need more than {0} bits; choose a wider interval or fewer points.",
+                "The moments of the interval need more than {0} bits; choose a wider interval or a smaller table.",
                 MaximumPrecision));
     }
 
-    /// <summary>How many bits the even moments lack; a centre that is a ball itself is not blamed on the working precision.</summary>
-    private static int MissingBits(Ball[] moments, Ball centre, int precision)
+    /// <summary>How many bits the even moments lack.</summary>
+    private static int MissingBits(Ball[] moments, int precision)
     {
-        int wanted = Math.Min(precision, centre.IsExact ? precision : centre.RelativeAccuracyBits / 2);
         int missing = int.MinValue;
         for (int k = 0; k < moments.Length; k += 2)
         {
             bool isPositive = moments[k].IsPositive == Trilean.True;
-            missing = Math.Max(missing, wanted - (isPositive ? moments[k].RelativeAccuracyBits : 0));
+            missing = Math.Max(missing, precision - (isPositive ? moments[k].RelativeAccuracyBits : 0));
         }
 
         return missing;
     }
 
-    private static Ball[] Upward(
-        Dyadic? lower, Dyadic? upper, Ball centre, int count, int working, CancellationToken cancellation)
+    private static Ball[] Upward(TruncatedInterval interval, int count, int working, CancellationToken cancellation)
     {
-        Boundary left = Boundary.At(lower, centre, working, cancellation);
-        Boundary right = Boundary.At(upper, centre, working, cancellation);
+        var left = Boundary.At(interval.Lower, interval.LowerDistance, working, cancellation);
+        var right = Boundary.At(interval.Upper, interval.UpperDistance, working, cancellation);
         var moments = new Ball[count];
-        moments[0] = NormalIntegral.Between(lower, upper, working, cancellation);
+        moments[0] = NormalIntegral.Between(interval.Lower, interval.Upper, working, cancellation);
         for (int k = 0; k + 1 < count; k++)
         {
             cancellation.ThrowIfCancellationRequested();
             Ball next = Ball.Subtract(left.Term, right.Term, working);
-            next = Ball.Subtract(next, Ball.Multiply(centre, moments[k], working), working);
+            next = Ball.Subtract(next, Ball.Multiply(interval.Centre, moments[k], working), working);
             moments[k + 1] = k == 0 ? next : Ball.Add(next, Ball.Multiply(moments[k - 1], Ball.FromInteger(k), working), working);
             left.Advance(working);
             right.Advance(working);
@@ -92,15 +104,19 @@ internal static class TruncatedMoments
     }
 
     private static Ball[] Downward(
-        Dyadic lower, Dyadic upper, Ball centre, int count, int steps, int working, CancellationToken cancellation)
+        TruncatedInterval interval, int count, int steps, int working, CancellationToken cancellation)
     {
         // Moments in units of ρᵏ, ρ a power of two not below |A| and |B|, so that all are of one size.
-        Ball left = Ball.Subtract(Ball.FromDyadic(lower), centre, working), right = Ball.Subtract(Ball.FromDyadic(upper), centre, working);
+        Ball left = interval.LowerDistance!.Value, right = interval.UpperDistance!.Value;
         int power = Math.Max(Approximation.CeilingLog2(left), Approximation.CeilingLog2(right));
-        Boundary[] ends = [Boundary.At(lower, centre, working, cancellation), Boundary.At(upper, centre, working, cancellation)];
+        Boundary[] ends =
+        [
+            Boundary.At(interval.Lower, left, working, cancellation),
+            Boundary.At(interval.Upper, right, working, cancellation),
+        ];
+        Bound start = Approximation.Magnitude(Ball.Subtract(right, left, working)) * LargestDensity(interval, ends);
         Ball[] differences = ScaledDifferences(ends[0], ends[1], power, steps, working, cancellation);
-        Ball scaledCentre = centre.ScaleByPowerOfTwo(power);
-        Bound start = Bound.FromDyadic(upper - lower) * LargestDensity(lower, upper, ends);
+        Ball scaledCentre = interval.Centre.ScaleByPowerOfTwo(power);
         Ball above = default(Ball).Enlarge(start), current = above;
         var moments = new Ball[count];
         for (int k = steps; k >= 1; k--)
@@ -134,9 +150,11 @@ internal static class TruncatedMoments
         return differences;
     }
 
-    private static Bound LargestDensity(Dyadic lower, Dyadic upper, Boundary[] ends) => lower.Sign <= 0 && upper.Sign >= 0
-        ? Bound.PowerOfTwo(0)
-        : Approximation.Magnitude(lower.Sign > 0 ? ends[0].Density : ends[1].Density);
+    /// <summary>A bound of the density over the interval; 1 where the interval may contain 0.</summary>
+    private static Bound LargestDensity(TruncatedInterval interval, Boundary[] ends) =>
+        interval.Lower!.Value.IsPositive == Trilean.True ? Approximation.Magnitude(ends[0].Density)
+        : interval.Upper!.Value.IsNegative == Trilean.True ? Approximation.Magnitude(ends[1].Density)
+        : Bound.PowerOfTwo(0);
 
     /// <summary>(end − c)ᵏ φ(end) as k grows; zero for an infinite end.</summary>
     private sealed class Boundary
@@ -147,20 +165,15 @@ internal static class TruncatedMoments
 
         internal Ball Term { get; private set; }
 
-        internal static Boundary At(Dyadic? end, Ball centre, int working, CancellationToken cancellation)
+        internal static Boundary At(Ball? end, Ball? distance, int working, CancellationToken cancellation)
         {
             if (end is not { } x)
             {
                 return new Boundary();
             }
 
-            Ball density = Elementary.Exp(Ball.FromDyadic(-(x * x).ScaleByPowerOfTwo(-1).Reduce()), working, cancellation);
-            return new Boundary
-            {
-                _distance = Ball.Subtract(Ball.FromDyadic(x), centre, working),
-                Density = density,
-                Term = density,
-            };
+            Ball density = Elementary.Exp(Ball.Square(x, working).Negate().ScaleByPowerOfTwo(-1), working, cancellation);
+            return new Boundary { _distance = distance!.Value, Density = density, Term = density };
         }
 
         internal void Advance(int working) => Term = Ball.Multiply(Term, _distance, working);

@@ -31,7 +31,7 @@ internal sealed class TruncatedNormalWeight : MomentWeight
     /// <inheritdoc/>
     internal override Ball[] Moments(int count, int precision, CancellationToken cancellation)
     {
-        Ball[] moments = TruncatedMoments.About(_lower, _upper, Ball.FromDyadic(_centre), count, precision, cancellation);
+        Ball[] moments = TruncatedMoments.About(_lower, _upper, _centre, count, precision, cancellation);
         for (int k = 1; IsEven && k < count; k += 2)
         {
             moments[k] = default;

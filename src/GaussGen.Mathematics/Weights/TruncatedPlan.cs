@@ -32,17 +32,17 @@ internal sealed class TruncatedPlan
 
     internal int WorkingPrecision { get; }
 
-    internal static TruncatedPlan For(Dyadic? lower, Dyadic? upper, Ball centre, int count, int precision)
+    internal static TruncatedPlan For(TruncatedInterval interval, int count, int precision)
     {
-        double a = Clip(lower, -Unbounded), b = Clip(upper, Unbounded), c = Approximation.ToDouble(centre);
+        double a = Clip(interval.Lower, -Unbounded), b = Clip(interval.Upper, Unbounded), c = Approximation.ToDouble(interval.Centre);
         double up = precision + 32 + UpwardLoss(a, b, c, count);
-        if (lower is null || upper is null)
+        if (interval.LowerDistance is not { } left || interval.UpperDistance is not { } right)
         {
             return new TruncatedPlan(c, 0, 0, count, isDownward: false, (int)Math.Min(up, 1 << 16));
         }
 
-        double reach = Math.Max(Distance(lower.Value, centre), Distance(upper.Value, centre));
-        double mode = Math.Max(a, Math.Min(b, 0)), width = Math.Max(1e-300, Approximation.ToDouble(upper.Value - lower.Value));
+        double reach = Math.Max(Math.Abs(Approximation.ToDouble(left)), Math.Abs(Approximation.ToDouble(right)));
+        double mode = Math.Max(a, Math.Min(b, 0)), width = Math.Max(1e-300, Approximation.ToDouble(Ball.Subtract(right, left, 64)));
         // What the first bound exceeds M₀ by, and what errors grow by on the last steps.
         double startLog = Math.Log(width) - (mode * mode / 2) - LogOfMoment(a, b, c, 0) + 2;
         double down = precision + 32 + ((startLog + (Math.Abs(c) * reach) + (reach * reach / 2)) / NaturalLogOfTwo);
@@ -109,8 +109,6 @@ internal sealed class TruncatedPlan
 
     private static double Price(double bits) => bits * Math.Sqrt(bits + 200);
 
-    private static double Distance(Dyadic end, Ball centre) => Math.Abs(Approximation.ToDouble(end - centre.Center));
-
-    private static double Clip(Dyadic? value, double infinite) =>
+    private static double Clip(Ball? value, double infinite) =>
         value is null ? infinite : Math.Max(-Unbounded, Math.Min(Unbounded, Approximation.ToDouble(value.Value)));
 }

@@ -19,6 +19,8 @@ public class FamilyReferenceTests
 
     private static readonly Dictionary<string, Func<double[], int, BinaryFormat, MomentRequest>> Requests = new()
     {
+        ["truncated"] = (p, order, format) => new TruncatedNormalMomentsRequest(p[0], p[1], p[2], p[3], order, format),
+        ["half-normal"] = (p, order, format) => new HalfNormalMomentsRequest(p[0], order, format),
         ["log-normal"] = (p, order, format) => new LogNormalMomentsRequest(p[0], p[1], order, format),
     };
 

@@ -29,8 +29,8 @@ public class TruncatedNormalTests
         const int Count = 12, Precision = 150;
         Dyadic? lower = End(a), upper = End(b);
         Dyadic first = TruncatedCentre.Choose(lower, upper, 5), second = TruncatedCentre.Choose(lower, upper, 40);
-        Ball[] here = TruncatedMoments.About(lower, upper, Ball.FromDyadic(first), Count, Precision, default);
-        Ball[] there = TruncatedMoments.About(lower, upper, Ball.FromDyadic(second), Count, Precision, default);
+        Ball[] here = TruncatedMoments.About(lower, upper, first, Count, Precision, default);
+        Ball[] there = TruncatedMoments.About(lower, upper, second, Count, Precision, default);
         Ball shift = Ball.FromDyadic(first - second);
         for (int k = 0; k < Count; k++)
         {
@@ -54,10 +54,10 @@ public class TruncatedNormalTests
         // Finite intervals in which neither way is hopeless: the plan picks one, a mass of a ball about the end the other.
         foreach ((double a, double b) in new[] { (-1.0, 2.0), (0.5, 3), (-4, 4), (1, 9) })
         {
-            Ball[] whole = TruncatedMoments.About(End(a), End(b), Ball.FromInteger(1), 30, 128, default);
-            Ball[] left = TruncatedMoments.About(End(a), End(b / 2), Ball.FromInteger(1), 30, 128, default);
-            Ball[] right = TruncatedMoments.About(End(b / 2), null, Ball.FromInteger(1), 30, 128, default);
-            Ball[] beyond = TruncatedMoments.About(End(b), null, Ball.FromInteger(1), 30, 128, default);
+            Ball[] whole = TruncatedMoments.About(End(a), End(b), new Dyadic(1, 0), 30, 128, default);
+            Ball[] left = TruncatedMoments.About(End(a), End(b / 2), new Dyadic(1, 0), 30, 128, default);
+            Ball[] right = TruncatedMoments.About(End(b / 2), null, new Dyadic(1, 0), 30, 128, default);
+            Ball[] beyond = TruncatedMoments.About(End(b), null, new Dyadic(1, 0), 30, 128, default);
             for (int k = 0; k < 30; k++)
             {
                 Ball sum = Ball.Subtract(Ball.Add(left[k], right[k], 400), beyond[k], 400);
