@@ -1,0 +1,158 @@
+using System;
+using System.Threading;
+using GaussGen.Mathematics.Arithmetic;
+
+namespace GaussGen.Mathematics.Proofs.Integrals;
+
+/// <summary>
+/// Integrals of powers times a normal density on a part of the line, up to the density's value at one point: with y = x − c,
+/// exp(−x²/2) = exp(−c²/2) exp(−cy − y²/2).
+/// </summary>
+/// <remarks>
+/// <para>
+/// On a finite length L the exponential is its Taylor series in τ = y/L (<see cref="ExponentialSeries"/>), integrated term by term. No
+/// integral is found from another, and no end value of the density is needed. The series' alternation is paid for in bits.
+/// </para>
+/// <para>
+/// What lies beyond a reach R is bounded: yᵏ exp(−cy − y²/2) has the logarithmic derivative k/y − c − y, which falls, so that beyond R
+/// the function is at most its value there times exp(−d(y − R)) with d = c + R − k/R, and the integral at most that value over d, for d > 0.
+/// </para>
+/// </remarks>
+internal static class TruncatedPowers
+{
+    private const int MaximumAttempts = 4;
+
+    /// <summary>∫ (x − c)ᵏ exp((c² − x²)/2) dx from c − below to c + above, for k = 0, …, count − 1.</summary>
+    /// <param name="center">c.</param>
+    /// <param name="below">The distance from the lower end to c, not negative; <c>null</c> for −∞.</param>
+    /// <param name="above">The distance from c to the upper end, not negative; <c>null</c> for +∞.</param>
+    /// <param name="count">The number of integrals.</param>
+    /// <param name="precision">The relative accuracy in bits that the integral of each side is to have.</param>
+    /// <param name="cancellation">Looked at before each step.</param>
+    public static Ball[] About(Ball center, Ball? below, Ball? above, int count, int precision, CancellationToken cancellation)
+    {
+        Ball[] left = OneSided(Ball.Negate(center), below, count, precision, cancellation);
+        Ball[] right = OneSided(center, above, count, precision, cancellation);
+        for (int k = 0; k < count; k++)
+        {
+            right[k] = Ball.Add(right[k], (k & 1) == 0 ? left[k] : Ball.Negate(left[k]), precision + 32);
+        }
+
+        return right;
+    }
+
+    /// <summary>∫ yᵏ exp(−cy − y²/2) dy from 0 to the length, for k = 0, …, count − 1.</summary>
+    /// <param name="slope">c, of either sign.</param>
+    /// <param name="length">The length, not negative; <c>null</c> for ∞.</param>
+    /// <param name="count">The number of integrals.</param>
+    /// <param name="precision">The relative accuracy in bits that each integral is to have, as far as that of c and the length allows.</param>
+    /// <param name="cancellation">Looked at before each step.</param>
+    public static Ball[] OneSided(Ball slope, Ball? length, int count, int precision, CancellationToken cancellation)
+    {
+        int aim = precision + 40;
+        for (int attempt = 1; ; attempt++)
+        {
+            Ball[] integrals = OnceOneSided(slope, length, count, aim, cancellation);
+            int accuracy = LeastAccuracy(integrals);
+            if (accuracy >= precision || attempt == MaximumAttempts)
+            {
+                return integrals;
+            }
+
+            aim = checked(aim + Math.Min(precision - accuracy, 2 * aim) + 8);
+        }
+    }
+
+    private static Ball[] OnceOneSided(Ball slope, Ball? length, int count, int aim, CancellationToken cancellation)
+    {
+        var plan = SidePlan.For(Estimate.Of(slope), length is { } given ? Estimate.Of(given) : double.PositiveInfinity, count - 1, aim);
+        var integrals = new Ball[count];
+        if (plan is null)
+        {
+            for (int k = 0; k < count; k++)
+            {
+                integrals[k] = Ball.WholeLine;
+            }
+
+            return integrals;
+        }
+
+        int bits = plan.Bits;
+        Ball end = plan.IsCut || length is null ? Ball.FromDyadic(Estimate.Exactly(plan.Reach)) : length.Value;
+        Ball first = Ball.Multiply(slope, end, bits + 16);
+        Ball second = Ball.Square(end, bits + 16).ScaleByPowerOfTwo(-1);
+        var series = new ExponentialSeries([first, second], bits, cancellation);
+        Bound last = plan.IsCut ? Above(Elementary.Exp(Ball.Negate(Ball.Add(first, second, 64)), 64, cancellation)) : default;
+        Ball power = end;
+        for (int k = 0; k < count; k++)
+        {
+            cancellation.ThrowIfCancellationRequested();
+            Ball value = Ball.Multiply(power, series.FromZero(k), aim + 32);
+            integrals[k] = plan.IsCut ? value.Enlarge(Beyond(slope, end, power, last, k)) : value;
+            power = Ball.Multiply(power, end, aim + 32);
+        }
+
+        return integrals;
+    }
+
+    /// <summary>R^(k+1) exp(−cR − R²/2) / (R(c + R) − k), or no bound where the divisor may not be above zero.</summary>
+    private static Bound Beyond(Ball slope, Ball end, Ball power, Bound last, int k)
+    {
+        Ball divisor = Ball.Subtract(Ball.Multiply(end, Ball.Add(slope, end, 64), 64), Ball.FromInteger(k), 64);
+        return divisor.IsPositive == Trilean.True ? Bound.DivideByAtLeast(Above(power) * last, divisor.Lower) : Bound.Infinite;
+    }
+
+    private static Bound Above(Ball value) => Bound.FromMagnitude(value.Midpoint, value.Exponent) + value.Radius;
+
+    private static int LeastAccuracy(Ball[] values)
+    {
+        int least = int.MaxValue;
+        foreach (Ball value in values)
+        {
+            least = Math.Min(least, value.IsFinite ? value.RelativeAccuracyBits : 0);
+        }
+
+        return least;
+    }
+
+    /// <summary>How far to integrate, and with how many bits; chosen by estimates, which may be wrong.</summary>
+    private sealed record SidePlan(bool IsCut, double Reach, int Bits)
+    {
+        // Beyond this the sizes do not matter any more.
+        private const double MostBits = 1 << 22;
+
+        private const int MaximumSteps = 200;
+
+        public static SidePlan? For(double slope, double length, int power, int aim)
+        {
+            if (double.IsNaN(slope) || double.IsInfinity(slope) || double.IsNaN(length))
+            {
+                return null;
+            }
+
+            // The integrand of the highest power is largest at the peak; from there on it must fall by so many bits.
+            double fall = (aim + (power * Estimate.Log2Error)) / Estimate.BitsPerUnit;
+            double root = Root(slope, 4.0 * power);
+            double peak = slope > 0 ? 2.0 * power / (slope + root) : (root - slope) / 2;
+            double reach = peak + (2 * fall / (Math.Max(slope, 0) + Root(slope, 2 * fall)));
+            double Lost(double y) => y <= 0 ? 0 : (slope * y) + (y * y / 2) - (power * Estimate.Log2(y) / Estimate.BitsPerUnit);
+            for (int step = 0; step < MaximumSteps && reach < length && Lost(reach) - Lost(peak) < fall; step++)
+            {
+                reach += reach / 16;
+            }
+
+            bool isCut = reach < length;
+            double end = isCut ? reach : length;
+            double top = Math.Min(peak, end);
+            double terms = (Math.Abs(slope) * end) + (end * end / 2);
+            double value = top <= 0 ? 0 : (slope * top) + (top * top / 2);
+            double rise = top <= 0 || power == 0 ? 0 : power * (Estimate.Log2(end / top) + Estimate.Log2Error);
+            double bits = aim + (Estimate.BitsPerUnit * (terms + value)) + rise;
+            return bits < MostBits && reach > 0 && !double.IsInfinity(reach) ? new SidePlan(isCut, reach, (int)bits) : null;
+        }
+
+        /// <summary>√(slope² + addend), without overflow.</summary>
+        private static double Root(double slope, double addend) =>
+            Math.Abs(slope) > 1e150 ? Math.Abs(slope) : Math.Sqrt((slope * slope) + addend);
+    }
+}
