@@ -37,7 +37,7 @@ internal static class Application
                 return ExitCode.NotRead;
             }
 
-            return await application.RunAsync(arguments, cancellation).ConfigureAwait(false);
+            return await application.RunAsync(NegativeValues.Join(arguments), cancellation).ConfigureAwait(false);
         }
         catch (OperationCanceledException)
         {

@@ -22,6 +22,21 @@ internal sealed class ClaimArguments(Declaration declaration)
             ? value
             : throw new ClaimException($"argument {_positional} of [{declaration.Name}] is not what this version of the tool expects; use the tool's version of the package");
 
+    /// <summary>The next positional argument, a list of numbers.</summary>
+    /// <exception cref="ClaimException">There is none, it is null, or it is of another type.</exception>
+    public IReadOnlyList<double> NextList()
+    {
+        int position = _positional + 1;
+        if (_positional < declaration.Arguments.Count && declaration.Arguments[_positional] is null)
+        {
+            throw new ClaimException($"argument {position} of [{declaration.Name}] is null where a list of numbers is expected; give the numbers");
+        }
+
+        object?[] list = Next<object?[]>();
+        return list.All(value => value is double) ? [.. list.Cast<double>()]
+            : throw new ClaimException($"argument {position} of [{declaration.Name}] is not a list of binary64 numbers; use the tool's version of the package");
+    }
+
     /// <summary>A named argument, or what the attribute means without it.</summary>
     /// <exception cref="ClaimException">It is of another type.</exception>
     public T Named<T>(string name, T otherwise)
@@ -40,6 +55,15 @@ internal sealed class ClaimArguments(Declaration declaration)
         1 => BinaryFormat.Binary32,
         var other => throw new ClaimException($"Format {other} of [{declaration.Name}] is unknown to this version of the tool; install a newer one"),
     };
+
+    /// <summary>Whether nodes whose weight rounds to zero are left out.</summary>
+    public bool DropZeroWeights() => Named("DropZeroWeights", false);
+
+    /// <summary>Whether a rule has a companion that estimates its error.</summary>
+    public bool HasErrorEstimate() => Named(ClaimFamily.ErrorEstimate, false);
+
+    /// <summary>The highest order of moments.</summary>
+    public int MaximumOrder() => Named("MaximumOrder", 4);
 
     /// <summary>Whether an enumeration's member is its second and last one.</summary>
     /// <exception cref="ClaimException">The number is of neither.</exception>

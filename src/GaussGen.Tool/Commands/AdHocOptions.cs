@@ -1,86 +1,93 @@
+using System;
+using System.Collections.Frozen;
 using System.Collections.Generic;
-using System.Globalization;
 using System.Linq;
-using GaussGen.Mathematics.Formats;
-using GaussGen.Mathematics.Proofs;
 using GaussGen.Tool.Exports;
 using GaussGen.Tool.Output;
 
 namespace GaussGen.Tool.Commands;
 
-/// <summary>Reads the options that describe a table which no assembly declares.</summary>
+/// <summary>Reads the options that describe a table which no assembly declares. A family has a line here.</summary>
 internal static class AdHocOptions
 {
     private const int DefaultMaximumOrder = 4;
 
+    private static readonly FrozenDictionary<string, Func<OptionValues, AdHocTable>> Rules = new Dictionary<string, Func<OptionValues, AdHocTable>>
+    {
+        ["gauss-hermite"] = read => AdHocTable.GaussHermite(
+            read.Integer("--points"), read.IsSecond("--convention", "probabilist", "physicist"), Rule(read)),
+        ["gauss-half-range-hermite"] = read => AdHocTable.GaussHalfRangeHermite(read.Integer("--points"), Rule(read)),
+        ["gauss-generalized-hermite"] = read => AdHocTable.GaussGeneralizedHermite(read.Integer("--points"), read.Number("--exponent"), Rule(read)),
+        ["gauss-log-normal"] = read => AdHocTable.GaussLogNormal(
+            read.Integer("--points"), read.Number("--log-mean"), read.Number("--log-standard-deviation"), Rule(read)),
+        ["gauss-normal-mixture"] = read => AdHocTable.GaussNormalMixture(
+            read.Integer("--points"), read.List("--weights"), read.List("--means"), read.List("--standard-deviations"), Rule(read)),
+    }.ToFrozenDictionary(StringComparer.Ordinal);
+
+    private static readonly FrozenDictionary<string, Func<OptionValues, AdHocTable>> Moments = new Dictionary<string, Func<OptionValues, AdHocTable>>
+    {
+        ["normal"] = read => AdHocTable.NormalMoments(
+            read.Number("--mean"), read.Number("--standard-deviation"), Order(read), read.Format()),
+    }.ToFrozenDictionary(StringComparer.Ordinal);
+
+    private static readonly FrozenDictionary<string, Func<OptionValues, AdHocTable>> Sequences = new Dictionary<string, Func<OptionValues, AdHocTable>>
+    {
+    }.ToFrozenDictionary(StringComparer.Ordinal);
+
+    /// <summary>The names of the tables that can be made, by the option that takes them.</summary>
+    public static IReadOnlyList<(string Option, IEnumerable<string> Names)> Names =>
+        [("--rule", Rules.Keys), ("--moments", Moments.Keys), ("--sequence", Sequences.Keys)];
+
     /// <summary>The table that the options describe; null if they describe none.</summary>
     /// <exception cref="InputException">An option is missing, out of place, or not a value that it can have.</exception>
-    public static AdHocTable? Read(ExportSettings settings)
+    public static AdHocTable? Read(TableSettings settings)
     {
-        if (settings.Rule is not null && settings.Moments is not null)
+        (string Option, string? Name, FrozenDictionary<string, Func<OptionValues, AdHocTable>> Families)[] kinds =
+        [
+            ("--rule", settings.Rule, Rules),
+            ("--moments", settings.Moments, Moments),
+            ("--sequence", settings.Sequence, Sequences),
+        ];
+        (string Option, string? Name, FrozenDictionary<string, Func<OptionValues, AdHocTable>> Families)[] given = [.. kinds.Where(kind => kind.Name is not null)];
+        if (given.Length > 1)
         {
-            throw new InputException("--rule and --moments describe different tables; give one of them");
+            throw new InputException($"{given[0].Option} and {given[1].Option} describe different tables; give one of them");
         }
 
-        RequireNone(settings.Rule is null ? settings.GivenRuleOptions : [], "--rule gauss-hermite");
-        RequireNone(settings.Moments is null ? settings.GivenMomentOptions : [], "--moments normal");
-        RequireNone(settings.Format is not null && settings is { Rule: null, Moments: null } ? ["--format"] : [], "--rule and --moments");
-        return settings.Rule is not null ? Rule(settings)
-            : settings.Moments is not null ? Moments(settings)
-            : null;
-    }
-
-    private static AdHocTable Rule(ExportSettings settings) => settings.Rule == "gauss-hermite"
-        ? AdHocTable.GaussHermite(
-            Integer("--points", settings.Points, "--rule gauss-hermite", 1, GaussHermiteClaim.LargestPointCount),
-            IsSecond("--convention", settings.Convention, "probabilist", "physicist"),
-            Format(settings),
-            settings.DropZeroWeights)
-        : throw new InputException($"--rule {settings.Rule} is unknown; choose gauss-hermite");
-
-    private static AdHocTable Moments(ExportSettings settings)
-    {
-        if (settings.Moments != "normal")
+        if (given.Length == 0)
         {
-            throw new InputException($"--moments {settings.Moments} is unknown; choose normal");
+            string? option = settings.Options.FirstOrDefault(option => option.Value is not null).Option;
+            return option is null ? null
+                : throw new InputException($"{option} describes a table that is made with --rule, --moments or --sequence; name one, or leave {option} out");
         }
 
-        double deviation = Number("--standard-deviation", settings.StandardDeviation);
-        return deviation > 0
-            ? AdHocTable.NormalMoments(
-                Number("--mean", settings.Mean),
-                deviation,
-                settings.MaximumOrder is null
-                    ? DefaultMaximumOrder
-                    : Integer("--maximum-order", settings.MaximumOrder, "--moments normal", 0, NormalMomentsClaim.LargestOrder),
-                Format(settings))
-            : throw new InputException($"--standard-deviation must be above zero, not {settings.StandardDeviation}");
+        (string kind, string? name, FrozenDictionary<string, Func<OptionValues, AdHocTable>> families) = given[0];
+        return families.TryGetValue(name!, out Func<OptionValues, AdHocTable>? read)
+            ? Read(read, new OptionValues($"{kind} {name}", settings.Options))
+            : throw new InputException($"{kind} {name} is unknown; choose {Choice(families.Keys)}");
     }
 
-    private static BinaryFormat Format(ExportSettings settings) =>
-        IsSecond("--format", settings.Format, "binary64", "binary32") ? BinaryFormat.Binary32 : BinaryFormat.Binary64;
-
-    private static bool IsSecond(string option, string? value, string first, string second) =>
-        value == second || (value is null || value == first ? false : throw new InputException($"{option} {value} is unknown; choose {first} or {second}"));
-
-    private static int Integer(string option, string? value, string family, int from, int to)
+    private static AdHocTable Read(Func<OptionValues, AdHocTable> read, OptionValues values)
     {
-        string range = $"a whole number from {from} to {to}";
-        return value is null ? throw new InputException($"{family} needs {option}, {range}")
-            : int.TryParse(value, NumberStyles.AllowLeadingSign, CultureInfo.InvariantCulture, out int number) && number >= from && number <= to ? number
-            : throw new InputException($"{option} must be {range}, not {value}");
-    }
-
-    private static double Number(string option, string? value) =>
-        value is null ? throw new InputException($"--moments normal needs {option}, a number")
-        : double.TryParse(value, NumberStyles.Float, CultureInfo.InvariantCulture, out double number) && double.IsFinite(number) ? number
-        : throw new InputException($"{option} must be a finite number such as 0.25 or 1.5e-3, not {value}");
-
-    private static void RequireNone(IEnumerable<string> options, string owner)
-    {
-        if (options.FirstOrDefault() is { } option)
+        try
         {
-            throw new InputException($"{option} belongs to {owner}; leave it out");
+            AdHocTable table = read(values);
+            values.RequireAllRead();
+            return table;
         }
+        catch (ArgumentException error)
+        {
+            throw values.Refusal(error);
+        }
+    }
+
+    private static RuleChoices Rule(OptionValues read) => new(read.Format(), read.Flag("--drop-zero-weights"), read.Flag("--error-estimate"));
+
+    private static int Order(OptionValues read) => read.Integer("--maximum-order", DefaultMaximumOrder);
+
+    private static string Choice(IEnumerable<string> names)
+    {
+        string[] all = [.. names.Order(StringComparer.Ordinal)];
+        return string.Join(", ", all[..^1]) + " or " + all[^1];
     }
 }

@@ -1,10 +1,12 @@
+using System;
 using System.Collections.Generic;
 using System.Linq;
 using System.Threading;
 using System.Threading.Tasks;
-using GaussGen.Mathematics.Proofs;
 using GaussGen.Tool.Explanations;
+using GaussGen.Tool.Exports;
 using GaussGen.Tool.Output;
+using GaussGen.Tool.Reading;
 using GaussGen.Tool.Verification;
 using Spectre.Console;
 using Spectre.Console.Cli;
@@ -19,35 +21,53 @@ internal sealed class ExplainCommand : AsyncCommand<ExplainSettings>
     {
         Terminal terminal = (Terminal)context.Data!;
         VerificationProgress progress = new();
-        FileResult file = await ProgressDisplay.RunAsync(
-            terminal, settings.IsQuiet, progress, () => Prove(settings, progress, cancellationToken), cancellationToken).ConfigureAwait(false);
+        return AdHocOptions.Read(settings) is { } adHoc
+            ? Show(
+                [PageOf(await RunAsync(() => adHoc.Construct(progress, cancellationToken)).ConfigureAwait(false), terminal, settings)], terminal)
+            : Show(await RunAsync(() => Prove(settings, progress, cancellationToken)).ConfigureAwait(false), terminal, settings);
 
-        bool isFirst = true;
-        foreach (TableResult table in file.Tables)
-        {
-            if (table.Proof is null)
-            {
-                Terminal.WriteLine(terminal.Results, FindingLine.Of(file, table, table.Findings[0]), new Style(Color.Red));
-                continue;
-            }
-
-            ExplanationPage page = new(table, file.Assembly!, terminal.Results.Profile.Capabilities.Unicode, settings.ShowsAll);
-            IEnumerable<PageLine> lines = isFirst ? page.Lines() : page.Lines().Prepend(new PageLine(""));
-            foreach (PageLine line in lines)
-            {
-                Terminal.WriteLine(terminal.Results, line.Text, line.Style);
-            }
-
-            isFirst = false;
-        }
-
-        return file.Tables.All(table => table.Verdict == Verdict.Proven) ? ExitCode.AllProven : ExitCode.NotAllProven;
+        Task<T> RunAsync<T>(Func<T> work) => ProgressDisplay.RunAsync(terminal, settings.IsQuiet, progress, work, cancellationToken);
     }
 
     private static FileResult Prove(ExplainSettings settings, VerificationProgress progress, CancellationToken cancellation)
     {
-        FileResult file = TableChoice.Open(settings.Assembly, progress, cancellation);
+        FileResult file = TableChoice.Open(settings.Assembly!, progress, cancellation);
         IReadOnlyList<DeclaredTable> tables = TableChoice.ChooseOneType(file, settings.Type);
         return file with { Tables = Verifier.Prove(tables, progress, cancellation) };
     }
+
+    private static int Show(FileResult file, Terminal terminal, ExplainSettings settings)
+    {
+        foreach (TableResult table in file.Tables.Where(table => table.Proof is null))
+        {
+            Terminal.WriteLine(terminal.Results, FindingLine.Of(file, table, table.Findings[0]), new Style(Color.Red));
+        }
+
+        int shown = Show([.. file.Tables.Where(table => table.Proof is not null).Select(table => PageOf(table, file.Assembly!, terminal, settings))], terminal);
+        return file.Tables.All(table => table.Proof is not null) ? shown : ExitCode.NotAllProven;
+    }
+
+    private static int Show(IReadOnlyList<ExplanationPage> pages, Terminal terminal)
+    {
+        foreach (ExplanationPage page in pages)
+        {
+            IEnumerable<PageLine> lines = page == pages[0] ? page.Lines() : page.Lines().Prepend(new PageLine(""));
+            foreach (PageLine line in lines)
+            {
+                Terminal.WriteLine(terminal.Results, line.Text, line.Style);
+            }
+        }
+
+        return pages.All(page => page.Proof.IsProven) ? ExitCode.AllProven : ExitCode.NotAllProven;
+    }
+
+    private static ExplanationPage PageOf(TableResult table, FoundAssembly assembly, Terminal terminal, ExplainSettings settings) => new(
+        $"{table.Type.Name}, in {assembly.Name} {assembly.Version}",
+        table.Proof!,
+        table.Digest!,
+        terminal.Results.Profile.Capabilities.Unicode,
+        settings.ShowsAll);
+
+    private static ExplanationPage PageOf(ExportedTable table, Terminal terminal, ExplainSettings settings) => new(
+        $"{table.Name}, in no assembly", table.Proof, table.Digest, terminal.Results.Profile.Capabilities.Unicode, settings.ShowsAll);
 }

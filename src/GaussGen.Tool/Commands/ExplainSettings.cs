@@ -1,15 +1,16 @@
 using System.ComponentModel;
+using GaussGen.Tool.Output;
 using Spectre.Console;
 using Spectre.Console.Cli;
 
 namespace GaussGen.Tool.Commands;
 
 /// <summary>The command line of <c>gaussgen explain</c>.</summary>
-internal sealed class ExplainSettings : CommandSettings
+internal sealed class ExplainSettings : TableSettings
 {
-    [CommandArgument(0, "<ASSEMBLY>")]
+    [CommandArgument(0, "[ASSEMBLY]")]
     [Description("The assembly that holds the table.")]
-    public string Assembly { get; init; } = "";
+    public string? Assembly { get; init; }
 
     [CommandArgument(1, "[TYPE]")]
     [Description("The type that declares it; not needed if the assembly has one table only.")]
@@ -24,8 +25,19 @@ internal sealed class ExplainSettings : CommandSettings
     public bool IsQuiet { get; init; }
 
     /// <inheritdoc/>
-    public override ValidationResult Validate() =>
-        string.IsNullOrWhiteSpace(Assembly) ? ValidationResult.Error("name an assembly")
-        : Type is not null && string.IsNullOrWhiteSpace(Type) ? ValidationResult.Error("name a type after the assembly")
-        : ValidationResult.Success();
+    public override ValidationResult Validate()
+    {
+        try
+        {
+            bool isAdHoc = AdHocOptions.Read(this) is not null;
+            return isAdHoc && Assembly is not null ? ValidationResult.Error("name an assembly, or describe a table with --rule, --moments or --sequence, not both")
+                : !isAdHoc && string.IsNullOrWhiteSpace(Assembly) ? ValidationResult.Error("name an assembly, or describe a table with --rule, --moments or --sequence")
+                : Type is not null && string.IsNullOrWhiteSpace(Type) ? ValidationResult.Error("name a type after the assembly")
+                : ValidationResult.Success();
+        }
+        catch (InputException error)
+        {
+            return ValidationResult.Error(error.Message);
+        }
+    }
 }

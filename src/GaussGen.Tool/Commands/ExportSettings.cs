@@ -1,4 +1,3 @@
-using System.Collections.Generic;
 using System.ComponentModel;
 using System.IO;
 using System.Linq;
@@ -10,7 +9,7 @@ using Spectre.Console.Cli;
 namespace GaussGen.Tool.Commands;
 
 /// <summary>The command line of <c>gaussgen export</c>.</summary>
-internal sealed class ExportSettings : CommandSettings
+internal sealed class ExportSettings : TableSettings
 {
     [CommandArgument(0, "[ASSEMBLY]")]
     [Description("The assembly whose tables are exported.")]
@@ -35,42 +34,6 @@ internal sealed class ExportSettings : CommandSettings
     [CommandOption("--allow-unproven")]
     [Description("Export a table although entries of it are not proven; the file says so.")]
     public bool AllowUnproven { get; init; }
-
-    [CommandOption("--rule <NAME>")]
-    [Description("Make a rule without an assembly: gauss-hermite.")]
-    public string? Rule { get; init; }
-
-    [CommandOption("--points <COUNT>")]
-    [Description("The number of nodes of the rule.")]
-    public string? Points { get; init; }
-
-    [CommandOption("--convention <NAME>")]
-    [Description("probabilist (weight: standard normal density) or physicist (exp(-x^2)).")]
-    public string? Convention { get; init; }
-
-    [CommandOption("--drop-zero-weights")]
-    [Description("Leave out nodes whose weight rounds to zero.")]
-    public bool DropZeroWeights { get; init; }
-
-    [CommandOption("--moments <NAME>")]
-    [Description("Make moments without an assembly: normal.")]
-    public string? Moments { get; init; }
-
-    [CommandOption("--mean <NUMBER>")]
-    [Description("The mean of the distribution.")]
-    public string? Mean { get; init; }
-
-    [CommandOption("--standard-deviation <NUMBER>")]
-    [Description("The standard deviation of the distribution.")]
-    public string? StandardDeviation { get; init; }
-
-    [CommandOption("--maximum-order <ORDER>")]
-    [Description("The highest order of the moments; 4 if it is not given.")]
-    public string? MaximumOrder { get; init; }
-
-    [CommandOption("--format <NAME>")]
-    [Description("binary64 or binary32, for --rule and --moments; binary64 if it is not given.")]
-    public string? Format { get; init; }
 
     [CommandOption("-q|--quiet")]
     [Description("Say nothing but what is wrong.")]
@@ -118,8 +81,8 @@ internal sealed class ExportSettings : CommandSettings
 
             _ = CreateWriter();
             bool isAdHoc = AdHocOptions.Read(this) is not null;
-            return isAdHoc && Assembly is not null ? ValidationResult.Error("name an assembly, or describe a table with --rule or --moments, not both")
-                : !isAdHoc && string.IsNullOrWhiteSpace(Assembly) ? ValidationResult.Error("name an assembly, or describe a table with --rule or --moments")
+            return isAdHoc && Assembly is not null ? ValidationResult.Error("name an assembly, or describe a table with --rule, --moments or --sequence, not both")
+                : !isAdHoc && string.IsNullOrWhiteSpace(Assembly) ? ValidationResult.Error("name an assembly, or describe a table with --rule, --moments or --sequence")
                 : Types.Any(string.IsNullOrWhiteSpace) ? ValidationResult.Error("name a type after the assembly, or leave it out for all")
                 : ValidationResult.Success();
         }
@@ -128,13 +91,4 @@ internal sealed class ExportSettings : CommandSettings
             return ValidationResult.Error(error.Message);
         }
     }
-
-    /// <summary>The options that describe a rule, and those of them that are given.</summary>
-    public IEnumerable<string> GivenRuleOptions => Given(("--points", Points), ("--convention", Convention), ("--drop-zero-weights", DropZeroWeights ? "" : null));
-
-    /// <summary>The same for moments.</summary>
-    public IEnumerable<string> GivenMomentOptions => Given(("--mean", Mean), ("--standard-deviation", StandardDeviation), ("--maximum-order", MaximumOrder));
-
-    private static IEnumerable<string> Given(params (string Name, string? Value)[] options) =>
-        options.Where(option => option.Value is not null).Select(option => option.Name);
 }

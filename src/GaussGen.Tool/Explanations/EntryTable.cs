@@ -1,3 +1,4 @@
+using System;
 using System.Collections.Generic;
 using System.Globalization;
 using System.Linq;
@@ -8,7 +9,7 @@ using Spectre.Console;
 
 namespace GaussGen.Tool.Explanations;
 
-/// <summary>The entries of a table side by side: two lines an index, the shortest decimals and below them the exact numbers.</summary>
+/// <summary>Lists of one length side by side: two lines an index, the shortest decimals and below them the exact numbers.</summary>
 /// <remarks>
 /// Of a symmetric rule one half says all. A page has room for <see cref="ShownRows"/> indices; of more, those at both ends are shown.
 /// </remarks>
@@ -17,22 +18,31 @@ internal sealed class EntryTable
     private const int ShownRows = 6;
     private const int IndexWidth = 4;
     private const int ColumnWidth = 25;
+    private const string Companion = "Companion";
 
     private readonly (string Name, EntryProof[] Entries)[] _columns;
     private readonly BinaryFormat _format;
     private readonly bool _isHalf;
     private readonly bool _showsAll;
 
-    /// <summary>The table of a proof's lists.</summary>
-    public EntryTable(TableProof proof, bool showsAll)
+    private EntryTable((string Name, EntryProof[] Entries)[] columns, BinaryFormat format, bool showsAll)
     {
-        _format = proof.Claim.Format;
+        _format = format;
         _showsAll = showsAll;
-        _columns =
+        _columns = columns;
+        _isHalf = !showsAll && Count > 1 && columns is [("Nodes" or "CompanionNodes", var nodes), (_, var weights)] && IsSymmetric(nodes, weights);
+    }
+
+    /// <summary>The tables of a proof's lists: those of a companion have one of their own.</summary>
+    public static IEnumerable<EntryTable> Of(TableProof proof, bool showsAll)
+    {
+        List<(string Name, EntryProof[] Entries)> columns =
         [
             .. proof.Entries.Where(entry => entry.Index is not null).GroupBy(entry => entry.Member).Select(group => (group.Key, group.ToArray())),
         ];
-        _isHalf = !showsAll && Count > 1 && _columns is [("Nodes", var nodes), ("Weights", var weights)] && IsSymmetric(nodes, weights);
+        return columns
+            .GroupBy(column => column.Name.StartsWith(Companion, StringComparison.Ordinal))
+            .Select(block => new EntryTable([.. block], proof.Claim.Format, showsAll));
     }
 
     private int Count => _columns.Length == 0 ? 0 : _columns.Max(column => column.Entries.Length);
@@ -80,13 +90,12 @@ internal sealed class EntryTable
         yield return new PageLine((new string(' ', IndexWidth + 1) + Cells(entries, Exact)).TrimEnd(), style);
     }
 
-    private static string Cells(EntryProof?[] entries, System.Func<EntryProof, string> write) =>
+    private static string Cells(EntryProof?[] entries, Func<EntryProof, string> write) =>
         string.Concat(entries.Select(entry => (entry is null ? "" : write(entry)).PadRight(ColumnWidth)));
 
     private string Decimal(EntryProof entry) => EncodingText.Number(entry.Found, _format);
 
-    private string Exact(EntryProof entry) => (_format.IsFinite(entry.Found) ? HexadecimalFloat.Write(entry.Found, _format) : "0x" + EncodingText.Bits(entry.Found, _format))
-        + (entry.Verdict == Verdict.Proven ? "" : " !");
+    private string Exact(EntryProof entry) => ExactText.Of(entry, _format);
 
     private bool IsSymmetric(EntryProof[] nodes, EntryProof[] weights) =>
         nodes.Length == weights.Length

@@ -6,7 +6,6 @@ using GaussGen.Mathematics.Formats;
 using GaussGen.Mathematics.Proofs;
 using GaussGen.Tool.Output;
 using GaussGen.Tool.Plots;
-using GaussGen.Tool.Reading;
 using GaussGen.Tool.Verification;
 using Spectre.Console;
 
@@ -18,11 +17,12 @@ namespace GaussGen.Tool.Explanations;
 internal sealed record PageLine(string Text, Style? Style = null);
 
 /// <summary>What a reviewer wants to know of one table, on one page of 80 columns.</summary>
-/// <param name="Result">The table and its proof.</param>
-/// <param name="Assembly">The assembly that holds it.</param>
+/// <param name="Name">What the table is called, and where it is.</param>
+/// <param name="Proof">Its proof.</param>
+/// <param name="Digest">The digest of its data.</param>
 /// <param name="IsUnicode">Whether more than ASCII can be shown.</param>
 /// <param name="ShowsAll">Whether every entry is shown, however many there are.</param>
-internal sealed record ExplanationPage(TableResult Result, FoundAssembly Assembly, bool IsUnicode, bool ShowsAll)
+internal sealed record ExplanationPage(string Name, TableProof Proof, string Digest, bool IsUnicode, bool ShowsAll)
 {
     private const int Width = 80;
     private const int Indent = 13;
@@ -36,25 +36,24 @@ internal sealed record ExplanationPage(TableResult Result, FoundAssembly Assembl
     /// <summary>The lines of the page, from a table of which a proof was made.</summary>
     public IEnumerable<PageLine> Lines()
     {
-        TableProof proof = Result.Proof!;
-        Explanation explanation = Explanation.Of(proof.Claim);
+        Explanation explanation = Explanation.Of(Proof.Claim);
         IEnumerable<PageLine> parts =
         [
-            new($"{Result.Type.Name}, in {Assembly.Name} {Assembly.Version}", Heading),
-            .. TextLayout.Wrap(proof.Claim.Title, Width).Select(line => new PageLine(line)),
+            .. TextLayout.Wrap(Name, Width).Select(line => new PageLine(line, Heading)),
+            .. TextLayout.Wrap(Proof.Claim.Title, Width).Select(line => new PageLine(line)),
             new(""),
             .. Labelled("Definition", explanation.Definition),
             .. Labelled("Exactness", explanation.Exactness),
-            .. Labelled("Format", [FormatText(proof.Claim.Format)]),
-            .. Labelled("SHA-256", [TableDigest.Digits(Result.Digest!)]),
-            .. Verdicts(proof),
-            .. Labelled("Proof", [proof.Claim.Method]),
+            .. Labelled("Constants", [.. Constants()]),
+            .. Labelled("Format", [FormatText(Proof.Claim.Format)]),
+            .. Labelled("SHA-256", [TableDigest.Digits(Digest)]),
+            .. Verdicts(),
+            .. Labelled("Proof", [Proof.Claim.Method]),
             .. Labelled("Sources", [explanation.Sources + "."]),
             .. Labelled("Caution", [explanation.Caution]),
-            new(""),
-            .. new EntryTable(proof, ShowsAll).Lines(),
-            .. Equations(proof),
-            .. Plot(proof),
+            .. Entries(explanation),
+            .. Equations(),
+            .. Plot(explanation),
         ];
         return parts.Select(line => line with { Text = IsUnicode ? line.Text : AsciiText.Of(line.Text) });
     }
@@ -77,35 +76,44 @@ internal sealed record ExplanationPage(TableResult Result, FoundAssembly Assembl
         $"{format.Name} (IEEE 754): {format.Precision.ToString(CultureInfo.InvariantCulture)} significant bits of "
         + $"{format.StorageBits.ToString(CultureInfo.InvariantCulture)}; every number also as C99 writes it, exactly.";
 
-    private IEnumerable<PageLine> Verdicts(TableProof proof)
+    /// <summary>Numbers beside the lists that a user can see.</summary>
+    private IEnumerable<string> Constants() => Proof.Entries
+        .Where(entry => entry is { Index: null, IsInteger: false, Member: "NormalizingIntegral" })
+        .Select(entry => $"{entry.Member} = {EncodingText.Number(entry.Found, Proof.Claim.Format)}, exactly {ExactText.Of(entry, Proof.Claim.Format)}");
+
+    private IEnumerable<PageLine> Entries(Explanation explanation) => explanation.MatrixSize is { } size
+        ? new MatrixTable(Proof, size, ShowsAll).Lines().Prepend(new PageLine(""))
+        : EntryTable.Of(Proof, ShowsAll).SelectMany(table => table.Lines().Prepend(new PageLine("")));
+
+    private IEnumerable<PageLine> Verdicts()
     {
-        string counts = $"{proof.ProvenCount} of {proof.Entries.Count} entries";
-        if (Result.Verdict == Verdict.Proven)
+        string counts = $"{Proof.ProvenCount} of {Proof.Entries.Count} entries";
+        if (Proof.IsProven)
         {
             string text = $"Proven: {counts} are what the declaration promises, each number the nearest one; none is further than "
-                + $"{UlpText.Of(proof.WorstDistanceInUlp)} ulp from its true value.";
+                + $"{UlpText.Of(Proof.WorstDistanceInUlp)} ulp from its true value.";
             return Labelled("Verdict", [text], Good);
         }
 
-        string[] findings = [.. Result.Findings.Take(ShownFindings).Select(finding => PlainText.OneLine(finding.Message) + ".")];
-        string rest = Result.Findings.Count > ShownFindings
-            ? $"And {Result.Findings.Count - ShownFindings} more; gaussgen verify lists them all."
-            : "";
-        string verdict = Result.Verdict == Verdict.Wrong ? "WRONG" : "NOT PROVEN";
+        IReadOnlyList<Finding> all = ProofFindings.Of(Proof);
+        string[] findings = [.. all.Take(ShownFindings).Select(finding => PlainText.OneLine(finding.Message) + ".")];
+        string rest = all.Count > ShownFindings ? $"And {all.Count - ShownFindings} more; gaussgen verify lists them all." : "";
+        string verdict = Proof.Verdict == Verdict.Wrong ? "WRONG" : "NOT PROVEN";
         return Labelled("Verdict", [$"{verdict}: {counts} are proven.", .. findings, .. rest.Length > 0 ? [rest] : System.Array.Empty<string>()], Bad);
     }
 
-    private static IEnumerable<PageLine> Equations(TableProof proof)
+    private IEnumerable<PageLine> Equations()
     {
-        if (proof.MomentEquations.Count == 0)
+        if (Proof.MomentEquations.Count == 0)
         {
             yield break;
         }
 
+        bool isEven = Proof.MomentEquations.All(equation => equation.Degree % 2 == 0);
         yield return new PageLine("");
-        yield return new PageLine("Moment equations Σ wᵢ xᵢᵏ = ∫ xᵏ w(x) dx; odd k hold by symmetry", Heading);
+        yield return new PageLine("Moment equations Σ wᵢ xᵢᵏ = ∫ xᵏ w(x) dx" + (isEven ? "; odd k hold by symmetry" : ""), Heading);
         yield return new PageLine("   k   relative residual at most   allowed by rounding");
-        foreach (MomentEquation equation in proof.MomentEquations)
+        foreach (MomentEquation equation in Proof.MomentEquations)
         {
             yield return new PageLine(
                 $"{equation.Degree,4}   {Residual(equation.Residual),-25}   {Residual(equation.Allowance),-19}   {(equation.Holds ? "holds" : "DOES NOT HOLD")}",
@@ -115,26 +123,28 @@ internal sealed record ExplanationPage(TableResult Result, FoundAssembly Assembl
 
     private static string Residual(double value) => value == 0 ? "0" : value.ToString("0.00E+0", CultureInfo.InvariantCulture);
 
-    private IEnumerable<PageLine> Plot(TableProof proof)
+    private IEnumerable<PageLine> Plot(Explanation explanation)
     {
-        bool isRule = proof.Entries.Any(entry => entry.Member == "Weights");
-        BinaryFormat format = proof.Claim.Format;
-        double[] values = [.. Values(proof, isRule ? "Weights" : "Absolute", format)];
-        double[] abscissas = isRule ? [.. Values(proof, "Nodes", format)] : [.. Enumerable.Range(0, values.Length).Select(order => (double)order)];
-        TerminalStemPlot plot = new([.. abscissas.Zip(values).Where(point => double.IsFinite(point.First))], Width, PlotHeight);
-        IReadOnlyList<string> lines = plot.Draw(IsUnicode);
-        if (lines.Count == 0)
+        if (explanation.Plot is not { } wanted)
         {
             return [];
         }
 
-        string title = (isRule ? "Weights over their nodes" : "Absolute moments by order") + (plot.IsLogarithmic ? ", on a logarithmic scale" : "");
-        return [new PageLine(""), new PageLine(title, Heading), .. lines.Select(line => new PageLine(line))];
+        double[] values = [.. Values(wanted.Values)];
+        double[] abscissas = wanted.Abscissas is { } member ? [.. Values(member)] : [.. Enumerable.Range(0, values.Length).Select(order => (double)order)];
+        TerminalStemPlot plot = new([.. abscissas.Zip(values).Where(point => double.IsFinite(point.First))], Width, PlotHeight);
+        IReadOnlyList<string> lines = plot.Draw(IsUnicode);
+        return lines.Count == 0 ? []
+            : [
+                new PageLine(""),
+                new PageLine(wanted.Title + (plot.IsLogarithmic ? ", on a logarithmic scale" : ""), Heading),
+                .. lines.Select(line => new PageLine(line)),
+            ];
     }
 
-    private static IEnumerable<double> Values(TableProof proof, string member, BinaryFormat format) => proof.Entries
+    private IEnumerable<double> Values(string member) => Proof.Entries
         .Where(entry => entry.Member == member && entry.Index is not null)
-        .Select(entry => format == BinaryFormat.Binary32
+        .Select(entry => Proof.Claim.Format == BinaryFormat.Binary32
             ? System.BitConverter.UInt32BitsToSingle((uint)entry.Found)
             : System.BitConverter.UInt64BitsToDouble(entry.Found));
 }

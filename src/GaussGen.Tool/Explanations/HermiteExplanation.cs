@@ -1,5 +1,3 @@
-using System.Collections.Generic;
-using System.Globalization;
 using GaussGen.Mathematics.Proofs;
 
 namespace GaussGen.Tool.Explanations;
@@ -11,39 +9,31 @@ namespace GaussGen.Tool.Explanations;
 /// </remarks>
 internal static class HermiteExplanation
 {
-    private static readonly Dictionary<string, string> Members = new()
-    {
-        ["PointCount"] = "The number of nodes.",
-        ["DegreeOfExactness"] = "The largest degree up to which every polynomial is integrated exactly, apart from rounding.",
-        ["Nodes"] = "The nodes, ascending.",
-        ["Weights"] = "The weights, in the order of the nodes.",
-        ["NodeScale"] = "What a node is multiplied by besides the standard deviation.",
-        ["ReciprocalTotalWeight"] = "One over the sum of all weights: the factor of the sum in an expectation.",
-    };
-
     /// <summary>What there is to say of a rule.</summary>
     public static Explanation Of(GaussHermiteClaim claim)
     {
         bool isDensity = claim.Weight == HermiteWeight.StandardNormalDensity;
-        string count = claim.Points.ToString(CultureInfo.InvariantCulture);
+        int degree = (2 * claim.Points) - 1;
         string polynomial = (isDensity ? "He" : "H") + Explanation.Subscript(claim.Points);
         return new Explanation(
             [
                 "Σ wᵢ f(xᵢ) ≈ ∫ f(x) w(x) dx over the real line,",
                 isDensity ? "w(x) = exp(−x²/2)/√(2π), the standard normal density (probabilists' convention)." : "w(x) = exp(−x²) (physicists' convention).",
-                $"The n = {count} nodes xᵢ are the zeros of the Hermite polynomial {polynomial},",
+                $"The n = {Explanation.Text(claim.Points)} nodes xᵢ are the zeros of the Hermite polynomial {polynomial},",
                 isDensity ? "He₀ = 1, He₁ = x, Heₖ₊₁ = x Heₖ − k Heₖ₋₁." : "H₀ = 1, H₁ = 2x, Hₖ₊₁ = 2x Hₖ − 2k Hₖ₋₁.",
                 isDensity ? "The weights are wᵢ = n!/(n Heₙ₋₁(xᵢ))²." : "The weights are wᵢ = 2ⁿ⁻¹ n! √π/(n Hₙ₋₁(xᵢ))².",
                 "For a normal variable X with mean m and standard deviation s:",
                 isDensity ? "E f(X) ≈ Σ wᵢ f(m + s xᵢ)." : "E f(X) ≈ (1/√π) Σ wᵢ f(m + √2 s xᵢ).",
             ],
             [
-                $"Exact for every polynomial up to degree {((2 * claim.Points) - 1).ToString(CultureInfo.InvariantCulture)}, apart from rounding;",
+                $"Exact for every polynomial up to degree {Explanation.Text(degree)}, apart from rounding;",
                 isDensity ? "otherwise off by n!/(2n)! f⁽²ⁿ⁾(ξ) for some ξ." : "otherwise off by n! √π/(2ⁿ (2n)!) f⁽²ⁿ⁾(ξ) for some ξ.",
             ],
-            Members,
-            "That the constants are right says nothing about an integrand that is no such polynomial; compare with a rule of more points "
-                + "before a result matters.",
-            "NIST DLMF 3.5(v), 18.9; Szegő, Orthogonal Polynomials (1939), 3.4");
+            RuleWords.Members,
+            RuleWords.Caution,
+            "NIST DLMF 3.5(v), 18.9; Szegő, Orthogonal Polynomials (1939), 3.4")
+        {
+            Plot = PlottedMembers.Rule,
+        };
     }
 }

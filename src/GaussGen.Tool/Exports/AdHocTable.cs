@@ -8,16 +8,24 @@ using GaussGen.Mathematics.Moments;
 using GaussGen.Mathematics.Proofs;
 using GaussGen.Mathematics.Requests;
 using GaussGen.Mathematics.Rules;
+using GaussGen.Mathematics.Sequences;
 using GaussGen.Tool.Claims;
 using GaussGen.Tool.Output;
 using GaussGen.Tool.Verification;
 
 namespace GaussGen.Tool.Exports;
 
+/// <summary>What may be chosen of every rule.</summary>
+/// <param name="Format">The number format.</param>
+/// <param name="DropZeroWeights">Whether nodes whose weight rounds to zero are left out.</param>
+/// <param name="ErrorEstimate">Whether a companion estimates the rule's error.</param>
+internal sealed record RuleChoices(BinaryFormat Format, bool DropZeroWeights, bool ErrorEstimate);
+
 /// <summary>
 /// A table that no assembly declares. It is constructed as the generator would, and then proven as if it had been found in an
 /// assembly. This is the only place of the tool that constructs anything; nothing of verification comes by here.
 /// </summary>
+/// <remarks>The makers throw <see cref="ArgumentException"/> for a parameter that cannot be, with the parameter's name.</remarks>
 /// <param name="Name">The table's name.</param>
 /// <param name="Attribute">The family, by the attribute that would declare it.</param>
 /// <param name="Request">What is wanted, for the construction.</param>
@@ -25,17 +33,59 @@ namespace GaussGen.Tool.Exports;
 internal sealed record AdHocTable(string Name, string Attribute, TableRequest Request, TableClaim Claim)
 {
     /// <summary>A Gauss–Hermite rule.</summary>
-    /// <param name="points">The number of nodes, in the range of <see cref="GaussHermiteClaim"/>.</param>
-    /// <param name="isPhysicist">Whether the weight function is exp(−x²) and not the standard normal density.</param>
-    /// <param name="format">The number format.</param>
-    /// <param name="dropZeroWeights">Whether nodes whose weight rounds to zero are left out.</param>
-    public static AdHocTable GaussHermite(int points, bool isPhysicist, BinaryFormat format, bool dropZeroWeights) => new(
-        "gauss_hermite_" + points.ToString(CultureInfo.InvariantCulture),
+    public static AdHocTable GaussHermite(int points, bool isPhysicist, RuleChoices choices) => Rule(
+        "gauss_hermite",
+        points,
         "GaussHermite",
-        new GaussHermiteRequest(points, isPhysicist ? HermiteConvention.Physicist : HermiteConvention.Probabilist, format, dropZeroWeights),
-        new GaussHermiteClaim(points, isPhysicist ? HermiteWeight.ExponentialOfMinusSquare : HermiteWeight.StandardNormalDensity, format, dropZeroWeights));
+        new GaussHermiteRequest(
+            points, isPhysicist ? HermiteConvention.Physicist : HermiteConvention.Probabilist, choices.Format, choices.DropZeroWeights),
+        new GaussHermiteClaim(
+            points,
+            isPhysicist ? HermiteWeight.ExponentialOfMinusSquare : HermiteWeight.StandardNormalDensity,
+            choices.Format,
+            choices.DropZeroWeights),
+        choices);
 
-    /// <summary>Moments of a normal distribution; the parameters are in the ranges of <see cref="NormalMomentsClaim"/>.</summary>
+    /// <summary>A rule for the half-normal density.</summary>
+    public static AdHocTable GaussHalfRangeHermite(int points, RuleChoices choices) => Rule(
+        "gauss_half_range_hermite",
+        points,
+        "GaussHalfRangeHermite",
+        new GaussHalfRangeHermiteRequest(points, choices.Format, choices.DropZeroWeights),
+        new GaussHalfRangeHermiteClaim(points, choices.Format, choices.DropZeroWeights, choices.ErrorEstimate),
+        choices);
+
+    /// <summary>A rule for |x|^(2μ) exp(−x²).</summary>
+    public static AdHocTable GaussGeneralizedHermite(int points, double exponent, RuleChoices choices) => Rule(
+        "gauss_generalized_hermite",
+        points,
+        "GaussGeneralizedHermite",
+        new GaussGeneralizedHermiteRequest(points, exponent, choices.Format, choices.DropZeroWeights),
+        new GaussGeneralizedHermiteClaim(points, exponent, choices.Format, choices.DropZeroWeights, choices.ErrorEstimate),
+        choices);
+
+    /// <summary>A rule for a log-normal density.</summary>
+    public static AdHocTable GaussLogNormal(int points, double logMean, double logStandardDeviation, RuleChoices choices) => Rule(
+        "gauss_log_normal",
+        points,
+        "GaussLogNormal",
+        new GaussLogNormalRequest(points, logMean, logStandardDeviation, choices.Format, choices.DropZeroWeights),
+        new GaussLogNormalClaim(points, logMean, logStandardDeviation, choices.Format, choices.DropZeroWeights, choices.ErrorEstimate),
+        choices);
+
+    /// <summary>A rule for a mixture of normal densities.</summary>
+    public static AdHocTable GaussNormalMixture(
+        int points, IReadOnlyList<double> weights, IReadOnlyList<double> means, IReadOnlyList<double> standardDeviations, RuleChoices choices) => Rule(
+        "gauss_normal_mixture",
+        points,
+        "GaussNormalMixture",
+        new GaussNormalMixtureRequest(
+            points, new ValueList(weights), new ValueList(means), new ValueList(standardDeviations), choices.Format, choices.DropZeroWeights),
+        new GaussNormalMixtureClaim(
+            points, weights, means, standardDeviations, choices.Format, choices.DropZeroWeights, choices.ErrorEstimate),
+        choices);
+
+    /// <summary>Moments of a normal distribution.</summary>
     public static AdHocTable NormalMoments(double mean, double standardDeviation, int maximumOrder, BinaryFormat format) => new(
         "normal_moments",
         "NormalMoments",
@@ -43,37 +93,63 @@ internal sealed record AdHocTable(string Name, string Attribute, TableRequest Re
         new NormalMomentsClaim(mean, standardDeviation, maximumOrder, format));
 
     /// <summary>Constructs and proves the table.</summary>
-    /// <exception cref="InputException">An entry is too large for the number format.</exception>
+    /// <exception cref="InputException">The table cannot be constructed, or an entry is too large for the number format.</exception>
     /// <exception cref="OperationCanceledException">The token was cancelled.</exception>
     public ExportedTable Construct(VerificationProgress progress, CancellationToken cancellation)
     {
         progress.BeginProving([1]);
-        TableData data = Request switch
-        {
-            RuleRequest rule => Data(TableMemo.Get(rule, cancellation)),
-            MomentRequest moments => Data(TableMemo.Get(moments, cancellation)),
-            _ => throw new NotSupportedException("A request that is neither for a rule nor for moments."),
-        };
+        TableData data = Data(cancellation);
         ClaimFamily family = ClaimTable.Find(Attribute)!;
+        family = Request is RuleRequest { ErrorEstimate: true } ? family.WithCompanion() : family;
         TableProof proof = Claim.Prove(data, progress.OfTable(0), cancellation);
         progress.EndTable(0);
         return new ExportedTable(Name, null, null, family, proof, FoundDigest.Of(data, family));
     }
 
+    private static AdHocTable Rule(string name, int size, string attribute, RuleRequest request, TableClaim claim, RuleChoices choices) => new(
+        name + "_" + size.ToString(CultureInfo.InvariantCulture), attribute, request with { ErrorEstimate = choices.ErrorEstimate }, claim);
+
+    private TableData Data(CancellationToken cancellation)
+    {
+        try
+        {
+            return Request switch
+            {
+                RuleRequest rule => Data(TableMemo.Get(rule, cancellation)),
+                MomentRequest moments => Data(TableMemo.Get(moments, cancellation)),
+                SequenceRequest sequences => Data(TableMemo.Get(sequences, cancellation)),
+                _ => throw new NotSupportedException("A request that is for no rule, for no moments and for no sequences."),
+            };
+        }
+        catch (Exception error) when (error is RuleConstructionException or InvalidOperationException)
+        {
+            throw new InputException($"{Claim.Title} cannot be made: {error.Message.TrimEnd('.')}");
+        }
+    }
+
     private static TableData Data(RoundedRule rule)
     {
+        List<DataSpan> spans = [Span("Nodes", rule.Format, rule.Nodes), Span("Weights", rule.Format, rule.Weights)];
         List<DataConstant> constants =
         [
             new("PointCount", null, (ulong)rule.Nodes.Count),
             new("DegreeOfExactness", null, (ulong)rule.Table.DegreeOfExactness),
+            .. rule.Table.Constants.Zip(rule.Constants, (named, value) => new DataConstant(named.Name, rule.Format, value.Bits)),
         ];
-        if (rule is { NodeScale: { } scale, ReciprocalTotalWeight: { } reciprocal })
+        if (rule is { NodeScale: { } scale, ReciprocalTotalWeight: { } reciprocal, Table.LocationScale.HasLocation: true })
         {
             constants.Add(new DataConstant("NodeScale", rule.Format, scale.Bits));
             constants.Add(new DataConstant("ReciprocalTotalWeight", rule.Format, reciprocal.Bits));
         }
 
-        return new TableData([Span("Nodes", rule.Format, rule.Nodes), Span("Weights", rule.Format, rule.Weights)], constants);
+        if (rule.Companion is { } companion)
+        {
+            spans.Add(Span("CompanionNodes", rule.Format, companion.Nodes));
+            spans.Add(Span("CompanionWeights", rule.Format, companion.Weights));
+            constants.Add(new DataConstant(SumForm.ErrorFactor, rule.Format, companion.Factor.Bits));
+        }
+
+        return new TableData(spans, constants);
     }
 
     private static TableData Data(RoundedMoments moments)
@@ -93,6 +169,18 @@ internal sealed record AdHocTable(string Name, string Attribute, TableRequest Re
         IEnumerable<DataConstant> constants = spans.SelectMany(span => span.Bits.Select((bits, index) =>
             new DataConstant(span.Name + index.ToString(CultureInfo.InvariantCulture), span.Format, bits)));
         return new TableData(spans, [.. constants]);
+    }
+
+    private static TableData Data(RoundedSequences sequences)
+    {
+        if (sequences.FirstOverflow is { } overflow)
+        {
+            throw new InputException(
+                $"{overflow.Name}[{overflow.Index}] is too large for {sequences.Format.Name}; ask for less, or choose another --format");
+        }
+
+        return new TableData(
+            [.. sequences.Table.Sequences.Zip(sequences.Values, (sequence, values) => Span(sequence.Name, sequences.Format, values))], []);
     }
 
     private static DataSpan Span(string name, BinaryFormat format, IReadOnlyList<RoundedValue> values) =>

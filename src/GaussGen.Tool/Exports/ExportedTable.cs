@@ -23,17 +23,14 @@ internal sealed record ExportedMember(string Name, bool IsSpan, BinaryFormat? Fo
 internal sealed record ExportedTable(
     string Name, string? AssemblyName, string? AssemblyVersion, ClaimFamily Family, TableProof Proof, string Digest)
 {
-    // What the code of a plain sum does without them; a rule has no such numbers.
-    private static readonly string[] Trivial = ["IntegralLocation", "IntegralScale"];
-
     /// <summary>What is promised.</summary>
     public TableClaim Claim => Proof.Claim;
 
-    /// <summary>The members in the order of the proof, without constants that repeat an entry of a list.</summary>
+    /// <summary>The members in the order of the proof, without those that repeat an entry of a list or only say that a sum is taken as it stands.</summary>
     public IReadOnlyList<ExportedMember> Members { get; } =
     [
         .. Proof.Entries
-            .Where(entry => entry.Index is not null || !(Family.IsEntry(entry.Member) || Trivial.Contains(entry.Member)))
+            .Where(entry => entry.Index is not null || !(Family.IsEntry(entry.Member) || SumForm.IsTrivial(entry.Member)))
             .GroupBy(entry => entry.Member)
             .Select(group => Member(group.First(), [.. group], Proof.Claim.Format)),
     ];

@@ -12,10 +12,10 @@ namespace GaussGen.Tool.Output;
 /// </summary>
 internal static class AsciiText
 {
-    private const string Subscripts = "₀₁₂₃₄₅₆₇₈₉₊₋ᵢⱼₖₙ";
-    private const string PlainSubscripts = "0123456789+-ijkn";
-    private const string Superscripts = "⁰¹²³⁴⁵⁶⁷⁸⁹⁺⁻⁽⁾ʲᵏⁿ";
-    private const string PlainSuperscripts = "0123456789+-()jkn";
+    private const string Subscripts = "₀₁₂₃₄₅₆₇₈₉₊₋ᵢⱼₖₘₙ";
+    private const string PlainSubscripts = "0123456789+-ijkmn";
+    private const string Superscripts = "⁰¹²³⁴⁵⁶⁷⁸⁹⁺⁻⁽⁾ʲᵏⁿᵖ";
+    private const string PlainSuperscripts = "0123456789+-()jknp";
 
     private static readonly FrozenDictionary<char, string> Symbols = new Dictionary<char, string>
     {
@@ -33,8 +33,16 @@ internal static class AsciiText
         ['≤'] = "<=",
         ['≥'] = ">=",
         ['…'] = "...",
+        ['⋯'] = "...",
         ['×'] = "x",
         ['ő'] = "o",
+        ['∞'] = "infinity",
+        ['½'] = "1/2",
+        ['μ'] = "mu",
+        ['ψ'] = "psi",
+        ['ħ'] = "hbar",
+        ['⟨'] = "<",
+        ['⟩'] = ">",
     }.ToFrozenDictionary();
 
     /// <summary>The text in printable ASCII.</summary>

@@ -18,6 +18,9 @@ internal sealed class AttributeReader(MetadataReader metadata, MetadataNames nam
     private const byte Enumeration = 0x55;
     private const uint NullArray = 0xFFFFFFFF;
 
+    // One reader serves one assembly. Attributes may share their bytes, so that a small file could ask for arrays without end.
+    private int _elementsLeft = 1 << 20;
+
     /// <summary>
     /// The attribute's name without its suffix, or null if the attribute is none of GaussGen's. One counts if its type is in
     /// namespace GaussGen, of the assembly GaussGen or, where assemblies were merged, of this one.
@@ -100,7 +103,7 @@ internal sealed class AttributeReader(MetadataReader metadata, MetadataNames nam
         return isArray ? ReadArray(code, ref blob) : ReadValue(code, ref blob);
     }
 
-    private static (string Name, object? Value) ReadNamed(ref BlobReader blob)
+    private (string Name, object? Value) ReadNamed(ref BlobReader blob)
     {
         if (blob.ReadByte() is not (NamedField or NamedProperty))
         {
@@ -124,7 +127,7 @@ internal sealed class AttributeReader(MetadataReader metadata, MetadataNames nam
         return (name, isArray ? ReadArray((SignatureTypeCode)code, ref blob) : ReadValue((SignatureTypeCode)code, ref blob));
     }
 
-    private static object?[]? ReadArray(SignatureTypeCode code, ref BlobReader blob)
+    private object?[]? ReadArray(SignatureTypeCode code, ref BlobReader blob)
     {
         uint length = blob.ReadUInt32();
         if (length == NullArray)
@@ -133,7 +136,13 @@ internal sealed class AttributeReader(MetadataReader metadata, MetadataNames nam
         }
 
         // Every element takes at least one byte, so a length beyond what is left is a lie; nothing is allocated for it.
-        object?[] values = length <= blob.RemainingBytes ? new object?[length] : throw new BadImageFormatException();
+        if (length > blob.RemainingBytes || length > _elementsLeft)
+        {
+            throw new BadImageFormatException();
+        }
+
+        _elementsLeft -= (int)length;
+        object?[] values = new object?[length];
         for (int i = 0; i < values.Length; i++)
         {
             values[i] = ReadValue(code, ref blob);

@@ -22,7 +22,7 @@ internal static class FoundDigest
         [
             .. data.Spans.Select(span => DigestedMember.List(span.Name, span.Format, span.Bits)),
             .. data.Constants
-                .Where(constant => family.IsInteger(constant.Name) || covered.Contains(constant.Name))
+                .Where(constant => family.IsDigested(constant.Name) || covered.Contains(constant.Name))
                 .Select(constant => DigestedMember.Number(constant.Name, constant.Format, constant.Bits)),
         ]);
     }

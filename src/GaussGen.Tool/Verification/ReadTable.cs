@@ -25,6 +25,7 @@ internal sealed record ReadTable(DeclaredTable Declared, ClaimFamily? Family, Ta
             return Unread(declared, $"[{declared.Attribute}] is unknown to this version of the tool; install a newer one");
         }
 
+        family = family.As(declared.Declaration);
         TableClaim? claim = null;
         try
         {

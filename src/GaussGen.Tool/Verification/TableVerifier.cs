@@ -1,10 +1,8 @@
 using System;
 using System.Collections.Concurrent;
 using System.Collections.Generic;
-using System.Globalization;
 using System.Linq;
 using System.Threading;
-using GaussGen.Mathematics.Formats;
 using GaussGen.Mathematics.Proofs;
 using GaussGen.Tool.Output;
 using GaussGen.Tool.Reading;
@@ -43,7 +41,11 @@ internal sealed class TableVerifier
 
         try
         {
-            return Judge(table, Prove(claim, data, progress, cancellation)) with { Digest = FoundDigest.Of(data, read.Family!) };
+            TableProof proof = Prove(claim, data, progress, cancellation);
+            return new TableResult(table.Type, table.Attribute, claim, proof, proof.Entries.Count, ProofFindings.Of(proof))
+            {
+                Digest = FoundDigest.Of(data, read.Family!),
+            };
         }
         catch (Exception error) when (error is InvalidOperationException or ArithmeticException)
         {
@@ -60,37 +62,4 @@ internal sealed class TableVerifier
 
     private static TableResult Unprovable(DeclaredTable table, string reason, TableClaim? claim = null) =>
         new(table.Type, table.Attribute, claim, null, table.Size, [new Finding(FindingKind.NotProven, null, reason)]);
-
-    private static TableResult Judge(DeclaredTable table, TableProof proof)
-    {
-        List<Finding> findings = [];
-        findings.AddRange(proof.Faults.Select(fault => new Finding(FindingKind.WrongShape, null, fault.TrimEnd('.'))));
-        findings.AddRange(proof.Entries.Where(entry => entry.Verdict != Verdict.Proven).Select(entry => Describe(entry, proof.Claim.Format)));
-        if (findings.Count == 0 && proof.Verdict != Verdict.Proven)
-        {
-            MomentEquation broken = proof.MomentEquations.First(equation => !equation.Holds);
-            findings.Add(new Finding(
-                FindingKind.NotProven, null, $"every entry is proven, and yet the moment equation of degree {broken.Degree} does not hold; report this contradiction"));
-        }
-
-        return new TableResult(table.Type, table.Attribute, proof.Claim, proof, proof.Entries.Count, findings);
-    }
-
-    private static Finding Describe(EntryProof entry, BinaryFormat format)
-    {
-        string found = Text(entry.Found, entry, format);
-        string? expected = entry.Expected is { } bits ? Text(bits, entry, format) : null;
-        if (entry.Verdict == Verdict.Unproven)
-        {
-            string why = entry.Reason is null ? "" : ": " + entry.Reason.TrimEnd('.');
-            return new Finding(FindingKind.NotProven, entry.Name, $"{entry.Name} is not proven, found {found}{why}", expected, found);
-        }
-
-        string distance = entry.IsInteger ? "" : $", {UlpText.Of(entry.DistanceInUlp)} ulp from the true value";
-        string reason = entry.Reason is null ? "" : "; " + entry.Reason.TrimEnd('.');
-        return new Finding(FindingKind.WrongEntry, entry.Name, $"{entry.Name}: expected {expected}, found {found}{distance}{reason}", expected, found);
-    }
-
-    private static string Text(ulong bits, EntryProof entry, BinaryFormat format) =>
-        entry.IsInteger ? ((int)bits).ToString(CultureInfo.InvariantCulture) : EncodingText.Of(bits, format);
 }

@@ -28,7 +28,7 @@ public sealed class AnalyzerAgreementTests : IDisposable
         [GaussHermite(70, Format = NumberFormat.Binary32)] public static partial class Kept { }
         [GaussHermite(390, Convention = HermiteConvention.Physicist, DropZeroWeights = true)] public static partial class Far { }
         [NormalMoments(-0.0, 1e-3, MaximumOrder = 40)] public static partial class Still { public const double Raw41 = 1; public const double Raw00 = 2; }
-        [GaussHermite(3)] public static partial class Lead { public const double Nodes0 = 5; public const int Weights1 = 6; }
+        [GaussHermite(3)] public static partial class Lead { public const double Nodes0 = 5; public const int Weights1 = 6; public const double NormalizingIntegral = 7; public const double ErrorFactor = 8; }
         namespace @namespace.Größe { partial struct @struct { partial record Log { [GaussHermite(2)] partial class \u0041line { } } } }
         """;
 
@@ -36,6 +36,7 @@ public sealed class AnalyzerAgreementTests : IDisposable
 
     [Theory]
     [InlineData(Sources.Small, 14)]
+    [InlineData(Sources.Families, 3)]
     [InlineData(Sources.Large, 5)]
     [InlineData(Corners, 5)]
     public async Task The_analyzer_agrees_with_what_the_tool_writes_and_notices_each_changed_digit(string source, int tables)

@@ -160,7 +160,9 @@ public sealed class ExplainTests : IDisposable
     [InlineData("name an assembly", "")]
     [InlineData("name a type after the assembly", "x.dll", "")]
     [InlineData("x.dll does not exist; check the path, or build first", "x.dll", "T")]
-    [InlineData("missing", null)]
+    [InlineData("or describe a table with --rule, --moments or --sequence", null)]
+    [InlineData("not both", "x.dll", "--rule", "gauss-hermite", "--points", "3")]
+    [InlineData("--points 0: ", "--rule", "gauss-hermite", "--points", "0")]
     public async Task A_mistake_is_one_line(string line, params string[]? arguments)
     {
         Run run = await CommandLine.RunAsync(["explain", .. arguments ?? []]);
@@ -179,14 +181,52 @@ public sealed class ExplainTests : IDisposable
     [Fact]
     public async Task Every_family_has_its_words()
     {
-        Run json = await CommandLine.RunAsync("verify", _folder.Add("Boat.dll", Boat), "--json", _folder.Below("out.json"));
+        string path = _folder.Add("All.dll", FixtureCompiler.Generate(Sources.All));
+        Run json = await CommandLine.RunAsync("verify", path, "--json", _folder.Below("out.json"));
         Assert.Equal(0, json.ExitCode);
         string text = await File.ReadAllTextAsync(_folder.Below("out.json"));
-        Assert.All(ClaimTable.Attributes, family => Assert.Contains($"\"attribute\": \"{family}\"", text, StringComparison.Ordinal));
-        foreach (string type in Sources.Small.Split("partial class ")[1..].Select(rest => rest.Split(' ', '\n')[0]).Where(name => name != "Outer"))
+        Assert.All(ClaimTable.Attributes.Where(family => family != "GaussLogNormal"), family => Assert.Contains($"\"attribute\": \"{family}\"", text, StringComparison.Ordinal));
+        foreach (string type in Sources.TypesOf(Sources.All))
         {
-            Assert.Equal(0, (await CommandLine.RunAsync("explain", _folder.Below("Boat.dll"), type)).ExitCode);
+            Run run = await CommandLine.RunAsync("explain", path, type);
+            Assert.Equal((0, ""), (run.ExitCode, run.Messages));
+            AssertFits(run.Results);
+            Assert.Contains("\nVerdict      Proven: ", run.Results, StringComparison.Ordinal);
         }
+    }
+
+    [Fact]
+    public async Task Every_family_in_ASCII()
+    {
+        using MemoryStream output = new();
+        using StreamWriter results = new(output, Encoding.Latin1) { NewLine = "\n" };
+        using StringWriter messages = new();
+        Terminal terminal = Terminal.Of(results, messages);
+        terminal.Results.Profile.Capabilities.Unicode = false;
+        string path = _folder.Add("All.dll", FixtureCompiler.Generate(Sources.Families));
+        foreach (string type in Sources.TypesOf(Sources.Families))
+        {
+            Assert.Equal(0, await Application.RunAsync(["explain", path, type], terminal, CancellationToken.None));
+        }
+
+        await results.FlushAsync();
+        string page = Encoding.Latin1.GetString(output.ToArray());
+        Assert.All(page.Replace("\n", "", StringComparison.Ordinal), letter => Assert.InRange(letter, ' ', '~'));
+        Assert.DoesNotContain('?', page);
+        AssertFits(page);
+
+        // A letter without a spelling would be an underscore where none belongs: not before a subscript.
+        Assert.DoesNotMatch("(^|[ (])_|__", page);
+    }
+
+    [Fact]
+    public async Task A_table_without_an_assembly()
+    {
+        Run run = await CommandLine.RunAsync("explain", "--moments", "normal", "--mean", "-0.5", "--standard-deviation", "3");
+        Assert.Equal((0, ""), (run.ExitCode, run.Messages));
+        Assert.StartsWith("normal_moments, in no assembly\nMoments to order 4 of the normal distribution with mean -0.5 and standard\ndeviation 3.0\n", run.Results, StringComparison.Ordinal);
+        Assert.Contains("\n             m = -0.5, exactly -0x1.0p-1; s = 3.0, exactly 0x1.8p+1.\n", run.Results, StringComparison.Ordinal);
+        AssertFits(run.Results);
     }
 
     public void Dispose() => _folder.Dispose();

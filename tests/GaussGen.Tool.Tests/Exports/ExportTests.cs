@@ -88,9 +88,28 @@ public sealed class ExportTests : IDisposable
             ("Wind", ["--moments", "normal", "--mean", "1.5", "--standard-deviation", "0.25"]),
             ("Drift", ["--moments", "normal", "--mean=-0.5", "--standard-deviation", "3", "--maximum-order", "6", "--format", "binary32"]),
         ];
+        await AssertTwinsAsync(Assembly, twins);
+    }
+
+    [Fact]
+    public async Task Every_family_can_be_made_without_an_assembly()
+    {
+        (string Type, string[] Options)[] twins =
+        [
+            ("Noise", ["--rule", "gauss-half-range-hermite", "--points", "3"]),
+            ("Rough", ["--rule", "gauss-generalized-hermite", "--points", "3", "--exponent", "0.25"]),
+            ("TwoModes", ["--rule", "gauss-normal-mixture", "--points", "3", "--weights", "0.3,0.9", "--means", "-1,0.5", "--standard-deviations", "0.5,1.25"]),
+            ("TwoModes", ["--rule", "gauss-normal-mixture", "--points", "3", "--weights=0.3, 0.9", "--means=-1.0, +5e-1", "--standard-deviations", "0.5, 1.25"]),
+        ];
+        Assert.Empty(Sources.TypesOf(Sources.Families).Except(twins.Select(twin => twin.Type)));
+        await AssertTwinsAsync(_folder.Add("Families.dll", FixtureCompiler.Generate(Sources.Families)), twins);
+    }
+
+    private static async Task AssertTwinsAsync(string assembly, (string Type, string[] Options)[] twins)
+    {
         foreach ((string type, string[] options) in twins)
         {
-            JsonNode declared = await JsonAsync(Assembly, type);
+            JsonNode declared = await JsonAsync(assembly, type);
             JsonNode adHoc = await JsonAsync(options);
             Assert.Equal(declared["members"]!.ToJsonString(), adHoc["members"]!.ToJsonString());
             Assert.Equal(declared["claim"]!.GetValue<string>(), adHoc["claim"]!.GetValue<string>());

@@ -1,3 +1,6 @@
+using System.Collections.Generic;
+using System.Linq;
+
 namespace GaussGen.Tool.Tests.Fixtures;
 
 /// <summary>Declarations for the real generator: every family, every format, and the shapes that differ.</summary>
@@ -27,6 +30,17 @@ internal static class Sources
         }
         """;
 
+    /// <summary>The families beside the two oldest, in tables small enough to change every bit of them.</summary>
+    public const string Families = """
+        using GaussGen;
+        namespace SurveyBoat
+        {
+            [GaussHalfRangeHermite(3)] public static partial class Noise { }
+            [GaussGeneralizedHermite(3, 0.25)] public static partial class Rough { }
+            [GaussNormalMixture(3, new[] { 0.3, 0.9 }, new[] { -1, 0.5 }, new[] { 0.5, 1.25 })] public static partial class TwoModes { }
+        }
+        """;
+
     public const string Large = """
         using GaussGen;
         [GaussHermite(64)] public static partial class SixtyFour { }
@@ -35,4 +49,12 @@ internal static class Sources
         [GaussHermite(100, Format = NumberFormat.Binary32, DropZeroWeights = true)] public static partial class Dropped { }
         [NormalMoments(0.1, 1.7, MaximumOrder = 60)] public static partial class Wind { }
         """;
+
+    /// <summary>All declarations of small tables in one text.</summary>
+    public static string All => Small + Families.Replace("using GaussGen;", "", System.StringComparison.Ordinal);
+
+    /// <summary>The types of a text, by the names that they have in C#, without those that only hold others.</summary>
+    public static IEnumerable<string> TypesOf(string source) => source.Split('\n')
+        .Where(line => line.Contains('[') && line.Contains("partial ", System.StringComparison.Ordinal))
+        .Select(line => line.Split("partial ")[^1].Split(' ')[1]);
 }

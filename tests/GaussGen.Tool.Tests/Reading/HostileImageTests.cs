@@ -1,6 +1,6 @@
 using System;
 using System.IO;
-
+using System.Linq;
 using System.Reflection.PortableExecutable;
 using System.Threading;
 using System.Threading.Tasks;
@@ -37,6 +37,17 @@ public class HostileImageTests
                     static readonly float[] Few = { 1f, 1.5f };
                     public static ReadOnlySpan<float> Raw => Few;
                     public static ReadOnlySpan<byte> Bytes => new byte[] { 1, 2, 3 };
+                }
+            }
+            [GaussNormalMixture(1, new[] { 0.25, 0.75 }, new[] { -1.0, 1.0 }, new[] { 1.0, 2.0 }, ErrorEstimate = true)] static class C
+            {
+                [GaussEvenExponential(1, -2, 0.5)] static class D { public const double NormalizingIntegral = 1; }
+                [System.CodeDom.Compiler.GeneratedCode("GaussGen", "0.1.0")]
+                static double ExpectationWithError(Func<double, double> integrand, out double error)
+                {
+                    double companion = integrand(0.0);
+                    error = 0.5 * Math.Abs(companion - integrand(1.0));
+                    return companion;
                 }
             }
         }
@@ -148,6 +159,41 @@ public class HostileImageTests
         }
 
         Assert.InRange(GC.GetAllocatedBytesForCurrentThread() - before, 0, 16L << 20);
+    }
+
+    /// <summary>A list of an attribute: null, longer than its bytes, and one that is shared until it fills the memory.</summary>
+    [Theory]
+    [InlineData(0x7FFFFFFF)]
+    [InlineData(0x00010000)]
+    [InlineData(3)]
+    [InlineData(1)]
+    public void A_stated_length_of_a_list_is_not_believed(int length)
+    {
+        byte[] image = FixtureCompiler.Compile("[GaussGen.GaussEvenExponential(5, 0.3125, 0.625)] class T { }");
+        byte[] list = [2, 0, 0, 0, .. BitConverter.GetBytes(0.3125)];
+        int place = image.AsSpan().IndexOf(list);
+        Assert.True(BitConverter.TryWriteBytes(image.AsSpan(place), length));
+        long before = GC.GetAllocatedBytesForCurrentThread();
+        FoundType type = Assert.Single(Read(image).Types);
+        Assert.InRange(GC.GetAllocatedBytesForCurrentThread() - before, 0, 16L << 20);
+        Assert.Empty(type.Declarations);
+        Assert.Contains("the arguments of the attribute cannot be read", type.UnreadDeclarations["GaussEvenExponential"], StringComparison.Ordinal);
+    }
+
+    [Fact]
+    public void Lists_that_share_their_bytes_do_not_fill_the_memory()
+    {
+        string list = string.Join(',', new int[4096]);
+        byte[] image = FixtureCompiler.CompileAgainst(
+            "namespace GaussGen { public class ManyAttribute : System.Attribute { public ManyAttribute(params byte[] many) { } } }",
+            "GaussGen",
+            string.Concat(Enumerable.Range(0, 400).Select(number => $"[GaussGen.Many({list})] class T{number} {{ }}\n")));
+        Assert.InRange(image.Length, 0, 100_000);
+        long before = GC.GetAllocatedBytesForCurrentThread();
+        FoundAssembly found = Read(image);
+        Assert.InRange(GC.GetAllocatedBytesForCurrentThread() - before, 0, MostMemory);
+        Assert.Equal(256, found.Types.Count(type => type.Declarations.Count == 1));
+        Assert.Equal(144, found.Types.Count(type => type.UnreadDeclarations.ContainsKey("Many")));
     }
 
     [Fact]

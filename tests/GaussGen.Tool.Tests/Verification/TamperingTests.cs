@@ -30,6 +30,12 @@ public class TamperingTests
         { "[NormalMoments(1.5, 0.25)]", "[NormalMoments(1.5, 0.25, MaximumOrder = 5)]" },
         { "[NormalMoments(1.5, 0.25)]", "[NormalMoments(1.5, 0.25, MaximumOrder = 3)]" },
         { "[NormalMoments(1.5, 0.25)]", "[GaussHermite(5)]" },
+        { "[GaussGeneralizedHermite(4, 0.25)]", "[GaussGeneralizedHermite(4, 0.25000000001)]" },
+        { "[GaussGeneralizedHermite(4, 0)]", "[GaussHermite(4, Convention = HermiteConvention.Physicist)]" },
+        { "[GaussLogNormal(4, 0.1, 0.4)]", "[GaussLogNormal(4, 0.1, 0.4000000000000001)]" },
+        { "[GaussLogNormal(4, 0.1, 0.4)]", "[GaussLogNormal(4, 0.4, 0.1)]" },
+        { "[GaussNormalMixture(4, new[] { 0.5, 0.5 }, new double[] { -1, 1 }, new double[] { 1, 2 })]", "[GaussNormalMixture(4, new[] { 0.5, 0.5 }, new double[] { -1, 1 }, new double[] { 2, 1 })]" },
+        { "[GaussNormalMixture(4, new[] { 0.5, 0.5 }, new double[] { -1, 1 }, new double[] { 1, 2 })]", "[GaussNormalMixture(4, new[] { 0.5, 0.25 }, new double[] { -1, 1 }, new double[] { 1, 2 })]" },
     };
 
     /// <summary>Together with the constants these are more than twenty thousand flips.</summary>
@@ -144,18 +150,46 @@ public class TamperingTests
         });
     }
 
-    /// <summary>The tables that a change has touched are not all right, or the file is refused as damaged. Those that it has not touched are not proven again.</summary>
+    /// <summary>The tables that a change has touched are not all right, or the file is refused as damaged. What was changed is named.</summary>
     private static void AssertSomethingWrong(byte[] image, byte[] changed)
     {
-        IReadOnlyList<FoundType> before = Read(image);
-        if (TryRead(changed) is not { } after)
+        if (Touched(image, changed) is not { } touched)
         {
             return;
         }
 
+        TableResult[] results = Verify(touched);
+        Assert.Contains(results, result => result.Verdict == Verdict.Wrong);
+        IReadOnlyList<FoundType> before = Read(image);
+        foreach (FoundType type in touched)
+        {
+            FoundType old = before.Single(other => other.Name == type.Name);
+            foreach (FoundSpan span in type.Spans.Values.Where(span => old.Spans.TryGetValue(span.Name, out FoundSpan? other) && other.Count == span.Count))
+            {
+                foreach (int index in Enumerable.Range(0, span.Count).Where(index => span.Bits(index) != old.Spans[span.Name].Bits(index)))
+                {
+                    Assert.Contains(results.SelectMany(result => result.Findings), finding => finding.Member == $"{span.Name}[{index}]");
+                }
+            }
+
+            foreach (FoundConstant constant in type.Constants.Values.Where(constant => old.Constants.TryGetValue(constant.Name, out FoundConstant? other) && other != constant))
+            {
+                Assert.Contains(results.SelectMany(result => result.Findings), finding => finding.Member == constant.Name);
+            }
+        }
+    }
+
+    /// <summary>The types that a change has touched; null if the file is refused. Those that it has not touched are not proven again.</summary>
+    private static FoundType[]? Touched(byte[] image, byte[] changed)
+    {
+        IReadOnlyList<FoundType> before = Read(image);
+        if (TryRead(changed) is not { } after)
+        {
+            return null;
+        }
+
         Assert.Equal(before.Count, after.Count);
-        FoundType[] touched = [.. after.Where((type, index) => !IsSame(type, before[index]))];
-        Assert.Contains(Verify(touched), result => result.Verdict == Verdict.Wrong);
+        return [.. after.Where((type, index) => !IsSame(type, before[index]))];
     }
 
     private static bool IsSame(FoundType a, FoundType b) =>
