@@ -69,7 +69,7 @@ internal static class FamilyTimes
 
         List<double> times = Times(request, RoundsMilliseconds, LeastRounds);
         times.Sort();
-        return times[times.Count / 2].ToString("F2", CultureInfo.InvariantCulture);
+        return times[times.Count / 2].ToString("F3", CultureInfo.InvariantCulture);
     }
 
     private static List<double> Times(RuleRequest request, int milliseconds, int least)

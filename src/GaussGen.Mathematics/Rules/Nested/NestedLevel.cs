@@ -10,20 +10,18 @@ namespace GaussGen.Mathematics.Rules.Nested;
 /// <summary>One level of the nested rules, and the way to the next: README.md.</summary>
 internal sealed class NestedLevel
 {
-    // What the weights lose to cancellation on the way from t, beyond the first 16 bits; measured, and no matter for what is enclosed.
-    private const int LossPerNode = 6;
-    private const int OrderingPrecision = 64;
-
     private static readonly RealNumber Centre = RealNumber.Exact(0);
 
     // F, whose zeros are the squares of the nodes beside 0.
     private readonly IntegerPolynomial _nodePolynomial;
     private readonly IntegerPolynomial _derivative;
+    private readonly IntegerPolynomial _numerator;
 
     private NestedLevel(IntegerPolynomial nodePolynomial, NestedNode[] pairs)
     {
         _nodePolynomial = nodePolynomial;
         _derivative = pairs.Length == 0 ? nodePolynomial : nodePolynomial.Derivative();
+        _numerator = Numerator(nodePolynomial);
         Pairs = pairs;
         Nodes = [.. Enumerable.Reverse(pairs).Select(pair => pair.Negative), Centre, .. pairs.Select(pair => pair.Positive)];
         RealNumber[] weights = [.. pairs.Select(Weight)];
@@ -54,8 +52,10 @@ internal sealed class NestedLevel
     /// <summary>The pairs by t, ascending; the enclosures show that they are all different.</summary>
     private static NestedNode[] Order(IEnumerable<NestedNode> pairs, CancellationToken cancellation)
     {
+        // At the precision that is wanted again later.
+        const int Precision = Formats.Rounding.FirstPrecision + NestedNode.Reserve;
         (NestedNode Pair, Ball Enclosure)[] ordered =
-            [.. pairs.Select(pair => (Pair: pair, Enclosure: pair.Zero.Enclose(OrderingPrecision, cancellation))).OrderBy(p => p.Enclosure.Center)];
+            [.. pairs.Select(pair => (Pair: pair, Enclosure: pair.Square.Enclose(Precision, cancellation))).OrderBy(p => p.Enclosure.Center)];
         for (int i = 1; i < ordered.Length; i++)
         {
             if (Ball.IsLess(ordered[i - 1].Enclosure, ordered[i].Enclosure) != Trilean.True)
@@ -79,30 +79,31 @@ internal sealed class NestedLevel
         return new Rational(integral, _nodePolynomial[0]);
     }
 
-    private RealNumber Weight(NestedNode pair) => pair.Zero.ExactValue is { } exact
-        ? RealNumber.Exact(Numerator().At(exact) / (2 * exact * _derivative.At(exact)))
+    private RealNumber Weight(NestedNode pair) => pair.Square.ExactValue is { } exact
+        ? RealNumber.Exact(_numerator.At(exact) / (2 * exact * _derivative.At(exact)))
         : new RememberedNumber(null, (precision, cancellation) => Weight(pair, precision, cancellation));
 
     /// <summary>N(t) / (2 t F′(t)).</summary>
     private Ball Weight(NestedNode pair, int precision, CancellationToken cancellation)
     {
-        int working = precision + 16 + (LossPerNode * Nodes.Length);
-        Ball t = pair.Zero.Enclose(working, cancellation);
+        int working = precision + NestedNode.Reserve;
+        Ball t = pair.Square.Enclose(working, cancellation);
         Ball denominator = Ball.Multiply(t, _derivative.At(t, working), working).ScaleByPowerOfTwo(1);
-        return Ball.Divide(Numerator().At(t, working), denominator, working);
+        return Ball.Divide(_numerator.At(t, working), denominator, working);
     }
 
     /// <summary>
     /// N with N(tᵢ) = ∫ t F(t)/(t − tᵢ) φ: as F(t)/(t − tᵢ) = Σ fⱼ Σ tʳ tᵢ^(j−1−r) over r &lt; j, N(tᵢ) = Σ fⱼ Σ (2r+1)!! tᵢ^(j−1−r).
     /// </summary>
-    private IntegerPolynomial Numerator()
+    private static IntegerPolynomial Numerator(IntegerPolynomial nodePolynomial)
     {
-        var coefficients = new BigInteger[_nodePolynomial.Degree];
-        for (int j = 1; j <= _nodePolynomial.Degree; j++)
+        var coefficients = new BigInteger[nodePolynomial.Degree];
+        for (int r = 0; r < nodePolynomial.Degree; r++)
         {
-            for (int r = 0; r < j; r++)
+            BigInteger moment = NormalExtension.Moment(r + 1);
+            for (int j = r + 1; j <= nodePolynomial.Degree; j++)
             {
-                coefficients[j - 1 - r] += _nodePolynomial[j] * NormalExtension.Moment(r + 1);
+                coefficients[j - 1 - r] += nodePolynomial[j] * moment;
             }
         }
 

@@ -60,11 +60,12 @@ internal static class NormalExtension
     private static BigInteger[] Integrals(IntegerPolynomial nodes, int last)
     {
         var integrals = new BigInteger[last + 1];
-        for (int m = 0; m <= last; m++)
+        for (int k = 0; k <= last + nodes.Degree; k++)
         {
-            for (int r = 0; r <= nodes.Degree; r++)
+            BigInteger moment = Moment(k);
+            for (int m = Math.Max(0, k - nodes.Degree); m <= Math.Min(k, last); m++)
             {
-                integrals[m] += nodes[r] * Moment(r + m);
+                integrals[m] += nodes[k - m] * moment;
             }
         }
 

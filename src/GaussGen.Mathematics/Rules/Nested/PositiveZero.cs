@@ -15,8 +15,8 @@ internal sealed class PositiveZero
     // Steps from 4 to 1/16, up to 8192: the extensions are done with the first one.
     private const int MaximumScans = 7;
 
-    /// <summary>Halvings of the isolating interval before Newton's method takes over.</summary>
-    private const int FirstHalvings = 12;
+    /// <summary>Halvings of an interval from the grid before Newton's method takes over.</summary>
+    private const int Halvings = 12;
 
     private readonly IntegerPolynomial _polynomial;
     private readonly IntegerPolynomial _derivative;
@@ -57,7 +57,8 @@ internal sealed class PositiveZero
                 int next = polynomial.At(point).Sign;
                 if (next != 0 && next != sign)
                 {
-                    zeros.Add(new PositiveZero(polynomial, derivative, before, point, sign));
+                    (Dyadic low, Dyadic high) = Halve(polynomial, before, point, sign, Halvings, cancellation);
+                    zeros.Add(new PositiveZero(polynomial, derivative, low, high, sign));
                 }
 
                 (before, sign) = next != 0 ? (point, next) : (before, sign);
@@ -81,15 +82,8 @@ internal sealed class PositiveZero
         }
 
         (Dyadic low, Dyadic high) = (_low, _high);
-        for (int halvings = FirstHalvings; ; halvings *= 2)
+        for (int halvings = Halvings; ; halvings *= 2)
         {
-            for (int i = 0; i < halvings; i++)
-            {
-                cancellation.ThrowIfCancellationRequested();
-                Dyadic middle = Middle(low, high);
-                (low, high) = _polynomial.At(middle).Sign == _signBelow ? (middle, high) : (low, middle);
-            }
-
             Dyadic point = Newton(Middle(low, high), precision, cancellation);
             var radius = new Dyadic(1, Approximation.FloorLog2(point) - precision - 2);
             if (IsBetween(point - radius, point + radius))
@@ -102,7 +96,23 @@ internal sealed class PositiveZero
             {
                 return Ball.FromEndpoints(low, high, precision + 32);
             }
+
+            (low, high) = Halve(_polynomial, low, high, _signBelow, halvings, cancellation);
         }
+    }
+
+    /// <summary>The part of an isolating interval that has the zero; its upper end has not the sign below it, and may be the zero.</summary>
+    private static (Dyadic Low, Dyadic High) Halve(
+        IntegerPolynomial polynomial, Dyadic low, Dyadic high, int signBelow, int times, CancellationToken cancellation)
+    {
+        for (int i = 0; i < times; i++)
+        {
+            cancellation.ThrowIfCancellationRequested();
+            Dyadic middle = Middle(low, high);
+            (low, high) = polynomial.At(middle).Sign == signBelow ? (middle, high) : (low, middle);
+        }
+
+        return (low, high);
     }
 
     /// <summary>Whether the zero surely lies between two points.</summary>

@@ -10,9 +10,12 @@ namespace GaussGen.Mathematics.Rules.Universal;
 /// </summary>
 internal sealed class MomentResiduals
 {
+    private readonly Ball[] _sizes;
+
     private MomentResiduals(Ball[] residuals, Ball[] sizes, int exact)
     {
         Residuals = residuals;
+        _sizes = sizes;
         Bits = int.MaxValue;
         for (int k = 0; k < exact; k++)
         {
@@ -63,6 +66,23 @@ internal sealed class MomentResiduals
         }
 
         return new MomentResiduals(residuals, sizes, exact);
+    }
+
+    /// <summary>The residuals of the mean of two rules for one weight, all of which must vanish.</summary>
+    /// <exception cref="InvalidOperationException">One is surely not zero: a construction is wrong.</exception>
+    internal MomentResiduals MeanWith(MomentResiduals other, int precision)
+    {
+        var means = new Ball[Residuals.Length];
+        for (int k = 0; k < means.Length; k++)
+        {
+            means[k] = Ball.Add(Residuals[k], other.Residuals[k], precision).ScaleByPowerOfTwo(-1);
+            if (!means[k].ContainsZero)
+            {
+                throw new InvalidOperationException("The errors of two rules are not opposite as they should be; a construction is wrong.");
+            }
+        }
+
+        return new MomentResiduals(means, _sizes, means.Length);
     }
 
     /// <summary>The squares of the nodes from the middle upwards, and the weights of pairs.</summary>

@@ -74,12 +74,26 @@ public class AntiGaussianTests
         Assert.Equal(plain.Table.Description, rule.Table.Description);
         Assert.Null(plain.Companion);
         Assert.Equal(("anti-Gaussian rule", new Rational(1, 2), false), (companion.Title, companion.Factor, companion.IsSymmetric));
-        Assert.StartsWith("7 disjoint root intervals; residuals of the moments of order 0 to 11 at most 2^-", companion.Method, StringComparison.Ordinal);
-        Assert.EndsWith(" of their size, and those of order 12 and 13 opposite to the rule's own", companion.Method, StringComparison.Ordinal);
+        Assert.StartsWith(
+            "7 disjoint root intervals; residuals of the moments of order 0 to 11, and of the mean of both rules to 13, at most 2^-", companion.Method, StringComparison.Ordinal);
+        Assert.EndsWith(" of their size", companion.Method, StringComparison.Ordinal);
         Assert.Contains("Laurie", companion.Sources, StringComparison.Ordinal);
         Assert.Equal((7, 0.5), (rule.Companion!.Nodes.Count, Value(rule.Companion.Factor)));
         Assert.True(Estimating("quartic", 3).Construct(default).Companion!.IsSymmetric);
         Assert.False(Estimating("symmetric-mixture", 3).Construct(default).Companion!.IsSymmetric);
+    }
+
+    [Fact]
+    public void Two_rules_whose_errors_are_not_opposite_are_found_out()
+    {
+        var weight = new HalfRangeWeight();
+        Ball[] moments = weight.Moments(12, 128, default);
+        MomentResiduals Of(GaussRule rule) => MomentResiduals.Of(rule.At(128, default), moments, 10, isEven: false, 128, default);
+        MomentResiduals residuals = Of(GaussRule.Of(weight, 5));
+
+        Assert.True(residuals.MeanWith(Of(AntiGaussian.Of(weight, 5)), 128).Bits >= 60);
+        Assert.Throws<InvalidOperationException>(() => residuals.MeanWith(Of(GaussRule.Of(weight, 6)), 128));
+        Assert.Throws<InvalidOperationException>(() => residuals.MeanWith(residuals, 128));
     }
 
     [Fact]
