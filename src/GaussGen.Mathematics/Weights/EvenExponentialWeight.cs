@@ -41,6 +41,12 @@ internal sealed class EvenExponentialWeight : MomentWeight
     /// <inheritdoc/>
     internal override bool IsEven => true;
 
+    /// <summary>p in the coordinate y.</summary>
+    internal EvenPolynomial Exponent => _exponent;
+
+    /// <summary>The binary logarithm of the unit of the coordinate y: x = 2^power · y.</summary>
+    internal int Power => _power;
+
     private bool IsNormal => _exponent.Terms == 1;
 
     /// <summary>∫ exp(−p(x)) dx over the real line.</summary>

@@ -41,6 +41,12 @@ internal sealed class TrapezoidalStep
         _ = StripBound.Peak(onAxis, 0, 0, out double firstTop);
         lastTop = last == 0 ? firstTop : lastTop;
         double range = Math.Sqrt(squareAtLast);
+        // Where the peak is not found it lies beyond 10¹²; where it is so high the wells are too deep by far.
+        if (!(range > 0) || !(Math.Max(firstTop, lastTop) < 1e9))
+        {
+            throw EvenExponentialIntegrals.TooManyTerms();
+        }
+
         double wanted = (precision + 8) * Math.Log(2), bestStep = 0, bestHeight = range;
         for (double height = range * 4; height > range * 1e-4; height /= 1.4)
         {
