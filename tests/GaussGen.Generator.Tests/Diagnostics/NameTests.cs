@@ -53,6 +53,64 @@ public sealed class NameTests
         }
         """);
 
+    [Theory]
+    [InlineData("GaussHalfRangeHermite(3)", "private static double {|GAUSS006:Expectation|}(double scale, System.Func<double, double> f) => scale;")]
+    [InlineData("GaussHalfRangeHermite(3)", "private static double Expectation(double a, double b, System.Func<double, double> c) => Expectation(b, c);")]
+    [InlineData("GaussHalfRangeHermite(3)", "internal static double NormalizingIntegral => 1;")]
+    [InlineData("GaussTruncatedNormal(3, 0, 1)", "private static double {|GAUSS006:Expectation|}<T>(T f) => 1;")]
+    [InlineData("GaussEvenExponential(3, 1)", "private static double {|GAUSS006:NormalizingIntegral|}() => 1;")]
+    [InlineData("HalfIntegerGamma(3)", "private static double {|GAUSS006:Gamma|}(double x) => x;")]
+    [InlineData("HalfIntegerGamma(3)", "internal static double Elements => 1;")]
+    [InlineData("OscillatorMatrixElements(3, 2)", "private static int {|GAUSS006:get_Elements|}() => 0;")]
+    [InlineData("OscillatorMatrixElements(3, 2)", "internal static double Gamma => 1;")]
+    public Task A_member_of_a_type_with_another_table(string attribute, string member) => DeclarationTest.Report(
+        $$"""
+        using GaussGen;
+
+        [{{attribute}}]
+        internal static partial class Echo
+        {
+            {{member}}
+        }
+        """);
+
+    [Theory]
+    [InlineData("GaussHalfRangeHermite(3), NormalMoments(0, 1), HalfIntegerGamma(2), OscillatorMatrixElements(2, 2)")]
+    [InlineData("GaussHermite(3), {|GAUSS005:GaussHalfRangeHermite(3)|}")]
+    [InlineData("GaussEvenExponential(3, 1), {|GAUSS005:GaussTruncatedNormal(3, 0, 1)|}, {|GAUSS005:GaussHermite(3)|}")]
+    [InlineData("LogNormalMoments(0, 1), {|GAUSS005:NormalMoments(0, 1)|}")]
+    public Task Tables_beside_each_other(string attributes) => DeclarationTest.Report(
+        $$"""
+        using GaussGen;
+
+        [{{attributes}}]
+        internal static partial class Echo
+        {
+        }
+        """);
+
+    [Fact]
+    public Task A_type_that_inherits_from_one_with_lists() => DeclarationTest.Report(
+        """
+        using GaussGen;
+
+        [HalfIntegerGamma(3)]
+        internal partial class Bench
+        {
+        }
+
+        [OscillatorMatrixElements(2, 2)]
+        internal partial class Spring : Bench
+        {
+            internal static double Of() => Gamma[0] + Elements[0];
+        }
+
+        [{|GAUSS006:HalfIntegerGamma(2)|}]
+        internal partial class Second : Bench
+        {
+        }
+        """);
+
     [Fact]
     public Task An_integral_is_in_the_way_where_a_rule_has_one() => DeclarationTest.Report(
         """

@@ -53,6 +53,34 @@ public sealed class GoldenTests
         """));
 
     [Fact]
+    public void A_rule_with_a_scale_alone() => Verify("ScaleRule.txt", new Consumer(
+        """
+        using GaussGen;
+
+        [GaussHalfRangeHermite(2)]
+        internal static partial class Roll { }
+        """));
+
+    [Fact]
+    public void A_rule_as_it_stands_with_a_constant() => Verify("FixedRule.txt", new Consumer(
+        """
+        using GaussGen;
+
+        [GaussEvenExponential(3, 0, 1, Format = NumberFormat.Binary32)]
+        internal static partial class Well { }
+        """));
+
+    [Fact]
+    public void Lists_in_arrays() => Verify("Lists.txt", new Consumer(
+        """
+        using GaussGen;
+
+        [HalfIntegerGamma(2)]
+        internal static partial class HalfGamma { }
+        """)
+    { Framework = Framework.NetStandard20 });
+
+    [Fact]
     public void A_stand_in() => Verify("StandIn.txt", new Consumer(
         """
         using GaussGen;

@@ -71,6 +71,40 @@ public sealed class HostileConsumerTests
                 private static double Of() => Expectation(1, 2, x => x * x) + Nodes[0] + Raw[1] + Raw1;
             }
 
+            /// <summary>Has tables.</summary>
+            [global::GaussGen.GaussHalfRangeHermite(3)]
+            [global::GaussGen.HalfIntegerGamma(3, Format = NumberFormat.Binary32)]
+            [global::GaussGen.OscillatorMatrixElements(2, 3)]
+            [global::GaussGen.LogNormalMoments(0, 0.5)]
+            public static partial class Roll
+            {
+                /// <summary>Not that one.</summary>
+                public class System { }
+
+                /// <summary>Not that one.</summary>
+                public static int scale => 0;
+
+                /// <summary>Not that one.</summary>
+                public static int expectation => 0;
+
+                /// <summary>Not that one.</summary>
+                public static int companion => 0;
+
+                /// <summary>Not that one.</summary>
+                public static int error => 0;
+
+                private static double Of() => Expectation(2, x => x * x) + Nodes[0] + Raw[1] + Raw1 + Gamma[2] + Elements[3];
+            }
+
+            [global::GaussGen.GaussEvenExponential(3, -2, 1)]
+            internal static partial class Well
+            {
+                /// <summary>Not that one.</summary>
+                public class System { }
+
+                private static double Of() => Expectation(x => x * x) + NormalizingIntegral;
+            }
+
             /// <summary>Has tables inside.</summary>
             public partial interface IBoat
             {
@@ -129,7 +163,7 @@ public sealed class HostileConsumerTests
             Framework = isNewFramework ? Framework.Net80 : Framework.NetStandard20,
         }.Run();
 
-        Assert.Equal(6, outcome.Texts.Count);
+        Assert.Equal(11, outcome.Texts.Count);
         Assert.Empty(outcome.CompilerDiagnostics);
         Assert.Empty(await outcome.AnalyzerDiagnostics());
     }

@@ -22,6 +22,13 @@ internal sealed class ArgumentListSource(Random random)
         "double.NegativeInfinity", "double.MaxValue", "double.Epsilon", "1.5f", "float.NaN", "1.5m", "0.0 / 0.0", "-1 / 0.0", "1e200", "Known.Half",
     ];
 
+    private static readonly string[] Lists =
+    [
+        "null", "new double[0]", "new double[] { }", "new[] { 1.0 }", "new double[] { 1, 2 }", "new[] { 0.5, 0.25, 0.25 }", "new[] { 0.5, double.NaN }",
+        "new double[] { 0, 0 }", "new[] { -0.5, 1.5 }", "new[] { 1.0, Known.Half }", "new[] { Known.NoConstant, 1.0 }", "new double[2]", "new[] { 1e300, 1e-300 }",
+        "new int[] { 1, 2 }", "new object[] { 1.0 }", "new double[] { null }", "(double[])null", "new[] { 1.0, \"two\" }", "default(double[])",
+    ];
+
     private static readonly string[] Others =
     [
         "null", "true", "false", "\"five\"", "typeof(int)", "default", "default(int)", "nameof(Known)", "new int[] { 1 }", "new object()", "x => x", "Missing",
@@ -38,8 +45,38 @@ internal sealed class ArgumentListSource(Random random)
 
     public string Next()
     {
+        if (random.Next(3) == 0)
+        {
+            (string name, string fitting) = Other();
+            return name + (random.Next(3) == 0 ? AnyList() : "(" + fitting + ")");
+        }
+
         bool isRule = random.Next(2) == 0;
         return (isRule ? "GaussHermite" : "NormalMoments") + (random.Next(3) == 0 ? AnyList() : LikelyList(isRule));
+    }
+
+    /// <summary>One of the other families, with arguments of fitting kinds.</summary>
+    private (string Name, string Fitting) Other()
+    {
+        string first = Perhaps(Integer());
+        string real = Perhaps(Pick(Reals));
+        string[] settings =
+        [
+            Setting("Format", "NumberFormat"), $"DropZeroWeights = {Pick(["true", "false"])}", $"ErrorEstimate = {Pick(["true", "false"])}",
+        ];
+        string after = string.Concat(settings.Where(_ => random.Next(3) == 0).Select(setting => ", " + setting));
+        return random.Next(9) switch
+        {
+            0 => ("GaussHalfRangeHermite", first + after),
+            1 => ("GaussTruncatedNormal", $"{first}, {real}, {Perhaps(Pick(Reals))}{after}"),
+            2 => ("GaussGeneralizedHermite", $"{first}, {real}{after}"),
+            3 => ("GaussLogNormal", $"{first}, {real}, {Perhaps(Pick(Reals))}{after}"),
+            4 => ("GaussNormalMixture", $"{first}, {Perhaps(Pick(Lists))}, {Perhaps(Pick(Lists))}, {Perhaps(Pick(Lists))}{after}"),
+            5 => ("GaussEvenExponential", $"{first}, {Perhaps(Pick([.. Lists, "1, 2", "-1.0, Known.Half", "0, 0, 1"]))}{after}"),
+            6 => ("LogNormalMoments", $"{real}, {Perhaps(Pick(Reals))}"),
+            7 => ("HalfIntegerGamma", first),
+            _ => ("OscillatorMatrixElements", $"{first}, {Perhaps(Integer())}"),
+        };
     }
 
     /// <summary>Positional arguments of a fitting kind, then settings of a fitting kind; now and then one that does not fit.</summary>

@@ -102,6 +102,43 @@ public sealed class IncrementalTests
         Assert.DoesNotContain(session.ReasonsOf(TrackingNames.Target), reason => reason == IncrementalStepRunReason.Modified);
     }
 
+    [Fact]
+    public void Lists_in_declarations_are_compared_by_their_values()
+    {
+        const string Lists =
+            """
+            using GaussGen;
+
+            [GaussNormalMixture(3, new[] { 0.75, 0.25 }, new[] { 4.0, 3 }, new[] { 0.5, 1 })]
+            internal static partial class Quay { }
+
+            [GaussEvenExponential(3, 0.0, 1)]
+            internal static partial class Well { }
+
+            [OscillatorMatrixElements(2, 3)]
+            internal static partial class Spring { }
+            """;
+        EditingSession session = new(new Consumer(Lists, Other));
+        long constructions = TableMemo.Constructions;
+        object[] texts = TextsOf(session);
+
+        session.Edit(0, text => text
+            .Replace("new[] { 0.75, 0.25 }", "new double[] { 3 / 4.0, 0.25 }", StringComparison.Ordinal)
+            .Replace("3, 0.0, 1", "3, new double[] { -0.0, 1 }", StringComparison.Ordinal));
+
+        Assert.All(session.ReasonsOf(TrackingNames.Files), reason => Assert.Equal(IncrementalStepRunReason.Cached, reason));
+        Assert.Equal(constructions, TableMemo.Constructions);
+        Assert.Equal(texts, TextsOf(session), ReferenceEqualityComparer.Instance);
+
+        session.Edit(0, text => text.Replace("new[] { 0.5, 1 }", "new[] { 0.5, 1.25 }", StringComparison.Ordinal));
+
+        Assert.Equal(constructions + 1, TableMemo.Constructions);
+        Assert.Equal(
+            [IncrementalStepRunReason.Modified, IncrementalStepRunReason.Cached, IncrementalStepRunReason.Cached],
+            session.ReasonsOf(TrackingNames.Files).Order());
+        Assert.DoesNotContain(ObjectGraph.ReachableFrom(EditingSession.StepNames.SelectMany(session.ValuesOf)), IsOfACompilation);
+    }
+
     [Theory]
     [InlineData("Half => 0.5", "Half => 0.5; internal static int Nodes")]
     [InlineData("static partial class Echo", "partial class Echo")]

@@ -27,6 +27,7 @@ internal sealed class DeclarationTest : CSharpSourceGeneratorTest<TableGenerator
         ReferenceAssemblies = new ReferenceAssemblies("none");
         TestState.AdditionalReferences.AddRange(Framework.Net80.References);
         TestBehaviors |= TestBehaviors.SkipGeneratedSourcesCheck;
+        CompilerDiagnostics = CompilerDiagnostics.Warnings;
         foreach ((string source, int index) in sources.Select((source, index) => (source, index)))
         {
             TestState.Sources.Add(($"Source{index}.cs", source));
