@@ -18,8 +18,7 @@ namespace GaussGen;
 /// variable's unit to the power 2k.</para>
 /// <para>The type and all types that contain it must be partial. A type carries one rule at most. The attribute stays in the
 /// compiled assembly, so that a later check can read what was asked for.</para>
-/// <para>In a project that is marked as CLS-compliant, the compiler warns of arrays in attributes (CS3016) on a public
-/// type.</para>
+/// <para>In a project that is marked as CLS-compliant, the compiler warns of the arrays in this attribute (CS3016).</para>
 /// <para>Formulas: Trefethen and Weideman 2014, theorem 5.1 (moments by the trapezoidal rule); NIST DLMF 18.9.1.</para>
 /// </remarks>
 /// <example>

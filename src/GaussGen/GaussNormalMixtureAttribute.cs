@@ -16,8 +16,7 @@ namespace GaussGen;
 /// <para>One rule of n points for a mixture of k components does the work of k rules with n points each.</para>
 /// <para>The type and all types that contain it must be partial. A type carries one rule at most. The attribute stays in the
 /// compiled assembly, so that a later check can read what was asked for.</para>
-/// <para>In a project that is marked as CLS-compliant, the compiler warns of arrays in attributes (CS3016) on a public
-/// type.</para>
+/// <para>In a project that is marked as CLS-compliant, the compiler warns of the arrays in this attribute (CS3016).</para>
 /// <para>Formulas: Stein 1981 (moments of the components); Golub and Welsch 1969.</para>
 /// </remarks>
 /// <example>

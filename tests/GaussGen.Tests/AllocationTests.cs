@@ -45,6 +45,16 @@ public sealed class AllocationTests
     }
 
     [ReleaseFact]
+    public void A_generated_expectation_of_another_family_allocates_nothing()
+    {
+        Assert.Equal(0, Measure(static () => Roll.Expectation(0.5, new Echo(2.0, 0.3))));
+        Assert.Equal(0, Measure(static () => RollSingle.Expectation(0.5f, static x => x * x)));
+        Assert.Equal(0, Measure(static () => Shallow.Expectation(new Echo(2.0, 0.3)) + Quay.Expectation(static x => x * x)));
+        Assert.Equal(0, Measure(static () => Pendulum.Expectation(new Echo(2.0, 0.3)) + Pendulum.NormalizingIntegral));
+        Assert.Equal(0, Measure(static () => HalfGamma.Gamma[3] + HalfGamma.Reciprocal[3] + QuarticSpring.Elements[3] + FadingMoments.Raw[2]));
+    }
+
+    [ReleaseFact]
     public void A_standard_deviation_of_zero_and_the_check_of_it_allocate_nothing()
     {
         Assert.Equal(0, Measure(static () => RuleEvaluation.Symmetric(Nodes, Weights, 1.0, 0.0, new Echo(2.0, 0.3))));
@@ -52,6 +62,8 @@ public sealed class AllocationTests
         {
             Require.StandardDeviation(0.0);
             Require.StandardDeviation(1.0f);
+            Require.Scale(0.0);
+            Require.Scale(1.0f);
             return 0;
         }));
     }

@@ -9,7 +9,8 @@ namespace GaussGen.Tests;
 /// <summary>The attributes are part of what a compiled program promises, so they must be found in it again.</summary>
 public sealed class AttributeTests
 {
-    public static TheoryData<Type> Attributes { get; } = [typeof(GaussHermiteAttribute), typeof(NormalMomentsAttribute)];
+    public static TheoryData<Type> Attributes { get; } =
+        [.. typeof(GaussHermiteAttribute).Assembly.GetExportedTypes().Where(type => type.IsSubclassOf(typeof(Attribute)))];
 
     [Theory]
     [MemberData(nameof(Attributes))]
@@ -31,6 +32,43 @@ public sealed class AttributeTests
         Assert.Equal(HermiteConvention.Probabilist, attribute.Convention);
         Assert.Equal(NumberFormat.Binary64, attribute.Format);
         Assert.False(attribute.DropZeroWeights);
+        Assert.False(attribute.ErrorEstimate);
+    }
+
+    [Fact]
+    public void A_table_that_says_nothing_else_is_in_binary64_with_every_node_and_no_estimate() => Assert.All(
+        new Attribute[]
+        {
+            new GaussHalfRangeHermiteAttribute(5),
+            new GaussTruncatedNormalAttribute(5, lower: -1.0, upper: 2.0),
+            new GaussGeneralizedHermiteAttribute(5, exponent: 0.5),
+            new GaussLogNormalAttribute(5, logMean: 0.0, logStandardDeviation: 0.25),
+            new GaussNormalMixtureAttribute(5, weights: [1.0], means: [0.0], standardDeviations: [2.0]),
+            new GaussEvenExponentialAttribute(5, 1.0, 2.0),
+            new LogNormalMomentsAttribute(logMean: 0.0, logStandardDeviation: 0.25),
+            new HalfIntegerGammaAttribute(maximumOrder: 5),
+            new OscillatorMatrixElementsAttribute(size: 5, power: 3),
+        },
+        attribute => Assert.All(attribute.GetType().GetProperties().Where(property => property.CanWrite), property => Assert.Equal(
+            property.Name == "MaximumOrder" ? 4 : property.PropertyType == typeof(bool) ? false : NumberFormat.Binary64,
+            property.GetValue(attribute))));
+
+    [Fact]
+    public void Arguments_are_kept_under_their_names()
+    {
+        GaussTruncatedNormalAttribute truncated = new(5, -1.0, 2.0);
+        Assert.Equal((5, -1.0, 2.0), (truncated.Points, truncated.Lower, truncated.Upper));
+        GaussLogNormalAttribute logNormal = new(5, -1.0, 2.0);
+        Assert.Equal((5, -1.0, 2.0), (logNormal.Points, logNormal.LogMean, logNormal.LogStandardDeviation));
+        LogNormalMomentsAttribute moments = new(-1.0, 2.0);
+        Assert.Equal((-1.0, 2.0), (moments.LogMean, moments.LogStandardDeviation));
+        GaussNormalMixtureAttribute mixture = new(5, [0.5, 0.25], [1.0, 2.0], [3.0, 4.0]);
+        Assert.Equal((5, 0.25, 1.0, 4.0), (mixture.Points, mixture.Weights[1], mixture.Means[0], mixture.StandardDeviations[1]));
+        Assert.Equal([1.0, 2.0], new GaussEvenExponentialAttribute(5, 1.0, 2.0).Coefficients);
+        Assert.Equal((7, 0.5), (new GaussGeneralizedHermiteAttribute(7, 0.5).Points, new GaussGeneralizedHermiteAttribute(7, 0.5).Exponent));
+        Assert.Equal(7, new GaussHalfRangeHermiteAttribute(7).Points);
+        Assert.Equal(7, new HalfIntegerGammaAttribute(7).MaximumOrder);
+        Assert.Equal((7, 3), (new OscillatorMatrixElementsAttribute(7, 3).Size, new OscillatorMatrixElementsAttribute(7, 3).Power));
     }
 
     [Fact]

@@ -25,6 +25,8 @@ public sealed class RequireTests
     {
         Require.StandardDeviation(-0.0);
         Require.StandardDeviation(-0.0f);
+        Require.Scale(-0.0);
+        Require.Scale(-0.0f);
     }
 
     [Theory]
@@ -55,6 +57,32 @@ public sealed class RequireTests
             Assert.Throws<ArgumentOutOfRangeException>("standardDeviation", () => Require.StandardDeviation(value));
         Assert.Equal(value, refusal.ActualValue);
         Assert.Contains("must be finite and not negative. Pass 0 for", refusal.Message, StringComparison.Ordinal);
+    }
+
+    [Theory]
+    [InlineData(0.0)]
+    [InlineData(double.Epsilon)]
+    [InlineData(double.MaxValue)]
+    public void A_finite_scale_that_is_not_negative_passes(double value)
+    {
+        Require.Scale(value);
+        Require.Scale(value > 1.0 ? float.MaxValue : (float)value);
+    }
+
+    [Theory]
+    [InlineData(-double.Epsilon)]
+    [InlineData(-1.0)]
+    [InlineData(double.NaN)]
+    [InlineData(double.PositiveInfinity)]
+    [InlineData(double.NegativeInfinity)]
+    public void Any_other_scale_is_refused_with_advice(double value)
+    {
+        ArgumentOutOfRangeException refusal = Assert.Throws<ArgumentOutOfRangeException>("scale", () => Require.Scale(value));
+        Assert.Equal(value, refusal.ActualValue);
+        Assert.Contains("must be finite and not negative. Pass 0 for", refusal.Message, StringComparison.Ordinal);
+        float single = value > -1.0 && value < 0.0 ? -float.Epsilon : (float)value;
+        refusal = Assert.Throws<ArgumentOutOfRangeException>("scale", () => Require.Scale(single));
+        Assert.Equal(single, refusal.ActualValue);
     }
 
     [Fact]

@@ -12,7 +12,7 @@ namespace GaussGen.Mathematics.Rules;
 public sealed record RuleDescription(string Title, string Weight, string Nodes, string Method, string Sources)
 {
     /// <summary>The variable whose expectations the rule gives, as a noun phrase: "a normal variable".</summary>
-    public string Variable { get; init; } = "a variable whose density is " + Weight;
+    public string Variable { get; init; } = "a variable with " + Weight;
 }
 
 /// <summary>

@@ -181,7 +181,7 @@ public sealed class NameTests
 
         internal class Instrument
         {
-            protected int Nodes;
+            protected int Nodes = 1;
             internal int Weights { get; }
             private int PointCount => 0;
         }

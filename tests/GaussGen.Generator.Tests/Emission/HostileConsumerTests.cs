@@ -84,11 +84,10 @@ public sealed class HostileConsumerTests
                 /// <summary>Not that one.</summary>
                 public static int scale => 0;
 
-                /// <summary>Not that one.</summary>
-                public static int expectation => 0;
+                private static int expectation => 0;
 
                 /// <summary>Not that one.</summary>
-                public static int companion => 0;
+                public static int companion => expectation;
 
                 /// <summary>Not that one.</summary>
                 public static int error => 0;
@@ -96,7 +95,9 @@ public sealed class HostileConsumerTests
                 private static double Of() => Expectation(2, x => x * x) + Nodes[0] + Raw[1] + Raw1 + Gamma[2] + Elements[3];
             }
 
+            #pragma warning disable CS3016 // arrays in attributes
             [global::GaussGen.GaussEvenExponential(3, -2, 1)]
+            #pragma warning restore CS3016
             internal static partial class Well
             {
                 /// <summary>Not that one.</summary>
