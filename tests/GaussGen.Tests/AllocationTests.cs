@@ -51,6 +51,8 @@ public sealed class AllocationTests
         Assert.Equal(0, Measure(static () => RollSingle.Expectation(0.5f, static x => x * x)));
         Assert.Equal(0, Measure(static () => Shallow.Expectation(new Echo(2.0, 0.3)) + Quay.Expectation(static x => x * x)));
         Assert.Equal(0, Measure(static () => Pendulum.Expectation(new Echo(2.0, 0.3)) + Pendulum.NormalizingIntegral));
+        Assert.Equal(0, Measure(static () => FourWithError.ExpectationWithError(1.0, 0.5, new Echo(2.0, 0.3), out _)));
+        Assert.Equal(0, Measure(static () => RollWithError.ExpectationWithError(0.5, static x => x * x, out double error) + error));
         Assert.Equal(0, Measure(static () => HalfGamma.Gamma[3] + HalfGamma.Reciprocal[3] + QuarticSpring.Elements[3] + FadingMoments.Raw[2]));
     }
 

@@ -45,6 +45,9 @@ public sealed class AttributeTests
             new GaussLogNormalAttribute(5, logMean: 0.0, logStandardDeviation: 0.25),
             new GaussNormalMixtureAttribute(5, weights: [1.0], means: [0.0], standardDeviations: [2.0]),
             new GaussEvenExponentialAttribute(5, 1.0, 2.0),
+            new NestedHermiteAttribute(level: 2),
+            new TruncatedNormalMomentsAttribute(mean: 1.0, standardDeviation: 2.0, lower: 0.0, upper: 4.0),
+            new HalfNormalMomentsAttribute(scale: 0.5),
             new LogNormalMomentsAttribute(logMean: 0.0, logStandardDeviation: 0.25),
             new HalfIntegerGammaAttribute(maximumOrder: 5),
             new OscillatorMatrixElementsAttribute(size: 5, power: 3),
@@ -66,6 +69,9 @@ public sealed class AttributeTests
         Assert.Equal((5, 0.25, 1.0, 4.0), (mixture.Points, mixture.Weights[1], mixture.Means[0], mixture.StandardDeviations[1]));
         Assert.Equal([1.0, 2.0], new GaussEvenExponentialAttribute(5, 1.0, 2.0).Coefficients);
         Assert.Equal((7, 0.5), (new GaussGeneralizedHermiteAttribute(7, 0.5).Points, new GaussGeneralizedHermiteAttribute(7, 0.5).Exponent));
+        TruncatedNormalMomentsAttribute depth = new(1.0, 2.0, 3.0, 4.0);
+        Assert.Equal((1.0, 2.0, 3.0, 4.0), (depth.Mean, depth.StandardDeviation, depth.Lower, depth.Upper));
+        Assert.Equal((0.5, 3), (new HalfNormalMomentsAttribute(0.5).Scale, new NestedHermiteAttribute(3).Level));
         Assert.Equal(7, new GaussHalfRangeHermiteAttribute(7).Points);
         Assert.Equal(7, new HalfIntegerGammaAttribute(7).MaximumOrder);
         Assert.Equal((7, 3), (new OscillatorMatrixElementsAttribute(7, 3).Size, new OscillatorMatrixElementsAttribute(7, 3).Power));

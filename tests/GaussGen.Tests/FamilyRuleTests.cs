@@ -29,6 +29,32 @@ public sealed class FamilyRuleTests
     }
 
     [Fact]
+    public void Moments_of_a_half_normal_variable()
+    {
+        double mean = 0.75 * RootTwoOverPi;
+        AssertClose(mean, RollMoments.Raw1, 1e-15);
+        AssertClose(0.5625, RollMoments.Raw2, 0.0);
+        AssertClose(0.5625 - (mean * mean), RollMoments.Central2, 1e-15);
+        for (int order = 2; order <= 9; order++)
+        {
+            AssertClose((order - 1) * 0.5625 * RollMoments.Raw[order - 2], RollMoments.Raw[order], 1e-15);
+        }
+    }
+
+    [Fact]
+    public void Moments_of_a_truncated_normal_variable()
+    {
+        // X = 1.5 + 0.5 Z with Z in [−2, ∞), whose moments are a = h, b = 1 − 2h, … with the hazard h.
+        double hazard = Density(-2.0) / (1.0 - Cumulative(-2.0));
+        AssertClose(1.5 + (0.5 * hazard), Depth.Raw1, 1e-14);
+        double variance = 1.0 - (2.0 * hazard) - (hazard * hazard);
+        AssertClose(0.25 * variance, Depth.Central2, 1e-13);
+        AssertClose(Depth.Central2 + (Depth.Raw1 * Depth.Raw1), Depth.Raw2, 1e-15);
+        Assert.Equal(0.0, Depth.Central1);
+        Assert.Equal(Depth.Central4, Depth.Absolute4);
+    }
+
+    [Fact]
     public void A_scale_of_zero_gives_the_value_at_zero_in_one_call()
     {
         List<double> points = [];

@@ -44,3 +44,30 @@ internal static partial class QuarticSpring;
 
 [OscillatorMatrixElements(size: 3, power: 6)]
 internal static partial class SexticSpring;
+
+[GaussHermite(4, ErrorEstimate = true)]
+internal static partial class FourWithError;
+
+[GaussHermite(5, Convention = HermiteConvention.Physicist, Format = NumberFormat.Binary32, ErrorEstimate = true)]
+internal static partial class FivePhysicistWithError;
+
+[GaussHalfRangeHermite(4, ErrorEstimate = true)]
+internal static partial class RollWithError;
+
+[GaussEvenExponential(4, -2.0, 1.0, ErrorEstimate = true)]
+internal static partial class PendulumWithError;
+
+[NestedHermite(2, ErrorEstimate = true)]
+internal static partial class Nine;
+
+[NestedHermite(0, ErrorEstimate = true)]
+internal static partial class Mean;
+
+[NestedHermite(4)]
+internal static partial class ThirtyFive;
+
+[TruncatedNormalMoments(mean: 1.5, standardDeviation: 0.5, lower: 0.5, upper: double.PositiveInfinity, MaximumOrder = 6)]
+internal static partial class Depth;
+
+[HalfNormalMoments(scale: 0.75, MaximumOrder = 9)]
+internal static partial class RollMoments;

@@ -23,6 +23,9 @@ internal sealed class ArgumentReader
     /// <summary>The name of the argument that says up to which order there are moments.</summary>
     public const string MaximumOrderArgument = "MaximumOrder";
 
+    /// <summary>The name of the argument that says which rule of a chain is asked for.</summary>
+    public const string LevelArgument = "level";
+
     /// <summary>The name of the argument that asks for an estimate of the error.</summary>
     public const string ErrorEstimateArgument = "ErrorEstimate";
 
@@ -89,7 +92,7 @@ internal sealed class ArgumentReader
         return Require(value > 0.0 && IsFinite(value), value, 1.0, DiagnosticDescriptors.NotPositive, argument);
     }
 
-    public int Level(int highest) => InRange(DiagnosticDescriptors.LevelOutOfRange, "level", 0, 0, highest);
+    public int Level(int highest) => InRange(DiagnosticDescriptors.LevelOutOfRange, LevelArgument, 0, 0, highest);
 
     /// <summary>A number that says how large a table is and that is not the order of moments.</summary>
     public int Size(string argument, int lowest, int highest) =>

@@ -44,11 +44,25 @@ internal static class DeclarationTable
             read => new GaussEvenExponentialRequest(
                 read.Points(GaussEvenExponentialRequest.MaximumPoints), read.Coefficients(), read.Format(), read.DropZeroWeights()),
             constants: "NormalizingIntegral"),
+        Family.OfRules(
+            "NestedHermite",
+            read => new NestedHermiteRequest(read.Level(NestedHermiteRequest.MaximumLevel), read.Format(), read.DropZeroWeights()),
+            sizeArgument: ArgumentReader.LevelArgument),
         Family.OfMoments("NormalMoments", read => new NormalMomentsRequest(
             read.Finite("mean"),
             read.Positive("standardDeviation"),
             read.MaximumOrder(NormalMomentsRequest.LargestOrder),
             read.Format())),
+        Family.OfMoments("TruncatedNormalMoments", read =>
+        {
+            double mean = read.Finite("mean");
+            double deviation = read.Positive("standardDeviation");
+            (double lower, double upper) = read.Interval(mean);
+            return new TruncatedNormalMomentsRequest(
+                mean, deviation, lower, upper, read.MaximumOrder(TruncatedNormalMomentsRequest.LargestOrder), read.Format());
+        }),
+        Family.OfMoments("HalfNormalMoments", read => new HalfNormalMomentsRequest(
+            read.Positive("scale"), read.MaximumOrder(HalfNormalMomentsRequest.LargestOrder), read.Format())),
         Family.OfMoments("LogNormalMoments", read => new LogNormalMomentsRequest(
             read.Finite("logMean"),
             read.Positive("logStandardDeviation"),

@@ -56,8 +56,10 @@ internal static class RulePart
         paragraphs.Add(
             "Caution: that the constants are right says nothing about an integrand that is not such a polynomial; compare with a rule of more "
             + "points before a result matters.");
-        paragraphs.Add(Documentation.Escape(
-            $"Source: {description.Sources}{(rule.Companion is null ? string.Empty : "; of the companion: " + rule.Companion.Table.Sources)}."));
+        string companionSources = rule.Companion?.Table.Sources is { } sources && sources != description.Sources
+            ? "; of the companion: " + sources
+            : string.Empty;
+        paragraphs.Add(Documentation.Escape($"Source: {description.Sources}{companionSources}."));
         return paragraphs;
     }
 

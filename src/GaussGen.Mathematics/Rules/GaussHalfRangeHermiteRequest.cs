@@ -37,7 +37,10 @@ public sealed record GaussHalfRangeHermiteRequest : RuleRequest
     public override RuleTable Construct(CancellationToken cancellation) => UniversalRule.Construct(
         new HalfRangeWeight(),
         Points,
-        new FamilyWords("Half-range Gauss–Hermite rule", "the half-normal density on [0, ∞)", "Steen, Byrne and Gelbard 1969"),
+        new FamilyWords("Half-range Gauss–Hermite rule", "the half-normal density on [0, ∞)", "Steen, Byrne and Gelbard 1969")
+        {
+            Variable = "a half-normal variable",
+        },
         ErrorEstimate,
         cancellation) with
     {

@@ -19,6 +19,11 @@ public static class Samples
         ("GaussNormalMixture(5, new[] { 0.9, 0.1 }, new[] { 4, 3.2 }, new[] { 0.05, 0.2 })",
             "GaussNormalMixture(5, new[] { 0.9, 0.1 }, new[] { 4, 3.2 }, new[] { 0.05 })"),
         ("GaussEvenExponential(5, -2, 1)", "GaussEvenExponential(5, 1, -2)"),
+        ("GaussEvenExponential(5, -2, 1, ErrorEstimate = true)", "GaussEvenExponential(5, 1, -2, ErrorEstimate = true)"),
+        ("NestedHermite(2)", "NestedHermite(5)"),
+        ("NestedHermite(2, ErrorEstimate = true)", "NestedHermite(-1, ErrorEstimate = true)"),
+        ("TruncatedNormalMoments(1, 2, 0, 4, MaximumOrder = 9)", "TruncatedNormalMoments(1, 2, 4, 0, MaximumOrder = 9)"),
+        ("HalfNormalMoments(0.5, MaximumOrder = 9)", "HalfNormalMoments(-0.5, MaximumOrder = 9)"),
         ("NormalMoments(0, 1, MaximumOrder = 9)", "NormalMoments(0, -1, MaximumOrder = 9)"),
         ("LogNormalMoments(0, 0.25, MaximumOrder = 9)", "LogNormalMoments(0, -1, MaximumOrder = 9)"),
         ("HalfIntegerGamma(10)", "HalfIntegerGamma(201)"),
@@ -34,11 +39,14 @@ public static class Samples
         "GaussLogNormal(4, 0, 0.25)",
         "GaussNormalMixture(5, new[] { 0.9, 0.1 }, new[] { 4, 3.2 }, new[] { 0.05, 0.2 })",
         "GaussEvenExponential(5, -2, 1)",
+        "NestedHermite(2)",
     ];
 
     /// <summary>Moments beside those of the normal distribution.</summary>
     public static readonly ImmutableArray<string> OtherMoments =
     [
+        "TruncatedNormalMoments(1, 2, 0, 4)",
+        "HalfNormalMoments(0.5)",
         "LogNormalMoments(0, 0.25)",
     ];
 

@@ -73,14 +73,19 @@ public sealed class SeamTests
             ("NormalMoments(0, 1{0})", nameof(NormalMomentsAttribute.Format), "NumberFormat.Binary32"),
             .. Samples.OtherRules.Concat(Samples.OtherMoments).Concat(Samples.Sequences).Select(table =>
                 (table.Replace(")", "{0})", StringComparison.Ordinal), "Format", "NumberFormat.Binary32")),
+            ("GaussHermite(7{0})", nameof(GaussHermiteAttribute.ErrorEstimate), "true"),
+            .. Samples.OtherRules.Select(rule => (rule.Replace(")", "{0})", StringComparison.Ordinal), "ErrorEstimate", "true")),
             .. Samples.OtherMoments.Select(table => (table.Replace(")", "{0})", StringComparison.Ordinal), "MaximumOrder", "2")),
             .. Samples.RulesWithZeroWeights.Select(rule =>
                 (rule.Replace(")", ", Format = NumberFormat.Binary32{0})", StringComparison.Ordinal), "DropZeroWeights", "true")),
         ];
 
+        // No weight of a nested rule is so small that it rounds to zero.
         Assert.Equal(
-            DeclarationTable.Families.Sum(family => AttributeOf(family).GetProperties().Count(property => property.CanWrite && property.Name != "ErrorEstimate")),
-            settings.Length);
+            DeclarationTable.Families.Sum(family => AttributeOf(family).GetProperties().Count(property => property.CanWrite)),
+            settings.Length + 1);
+        Assert.All(settings, setting => Assert.False(
+            IsStandIn(TextOf(setting.Attribute.Replace("{0}", $", {setting.Property} = {setting.Value}", StringComparison.Ordinal))), setting.ToString()));
         Assert.All(settings, setting => Assert.NotEqual(
             TextOf(setting.Attribute.Replace("{0}", string.Empty, StringComparison.Ordinal)),
             TextOf(setting.Attribute.Replace("{0}", $", {setting.Property} = {setting.Value}", StringComparison.Ordinal))));

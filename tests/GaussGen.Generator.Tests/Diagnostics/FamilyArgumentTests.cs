@@ -109,6 +109,52 @@ public sealed class FamilyArgumentTests
     public Task What_is_just_in_range_has_no_mistake(string attribute) => Report(attribute, "Echo.Expectation(x => x) + Echo.Nodes[0]");
 
     [Theory]
+    [InlineData("{|GAUSS025:-1|}")]
+    [InlineData("{|GAUSS025:5|}")]
+    [InlineData("level: {|GAUSS025:int.MaxValue|}, ErrorEstimate = true")]
+    public Task Nested_hermite(string arguments) => Rule("NestedHermite", arguments);
+
+    [Theory]
+    [InlineData("GaussHermite(201, ErrorEstimate = {|GAUSS034:true|})")]
+    [InlineData("GaussHermite(1000, DropZeroWeights = true, ErrorEstimate = {|GAUSS034:true|})")]
+    [InlineData("GaussHermite({|GAUSS004:1001|}, ErrorEstimate = true)")]
+    public Task Error_estimates_that_there_are_not(string attribute) => Report(attribute, Uses.OfRule);
+
+    [Theory]
+    [InlineData("GaussHermite(200, ErrorEstimate = true)", "1, 2, ")]
+    [InlineData("GaussHermite(5, Convention = HermiteConvention.Physicist, Format = NumberFormat.Binary32, ErrorEstimate = true)", "1, 2, ")]
+    [InlineData("GaussHalfRangeHermite(5, ErrorEstimate = true)", "1, ")]
+    [InlineData("GaussTruncatedNormal(5, -20, 20, ErrorEstimate = true)", "")]
+    [InlineData("GaussTruncatedNormal(1, 0, 1, Format = NumberFormat.Binary32, ErrorEstimate = true)", "")]
+    [InlineData("GaussLogNormal(4, 0, 0.25, ErrorEstimate = true)", "")]
+    [InlineData("NestedHermite(0, ErrorEstimate = true)", "1, 2, ")]
+    [InlineData("NestedHermite(4, ErrorEstimate = true)", "1, 2, ")]
+    [InlineData("GaussHermite({|GAUSS012:60|}, Format = NumberFormat.Binary32, ErrorEstimate = true)", "1, 2, ")]
+    [InlineData("GaussHermite(60, Format = NumberFormat.Binary32, ErrorEstimate = true, DropZeroWeights = true)", "1, 2, ")]
+    public Task Error_estimates_that_there_are(string attribute, string before) => Report(
+        attribute,
+        $"Echo.ExpectationWithError({before}x => x, out error) + Echo.ExpectationWithError({before}new Square(), out error) + Echo.CompanionNodes[0] + Echo.CompanionWeights[0]");
+
+    [Theory]
+    [InlineData("{|GAUSS007:double.NaN|}, 1, 0, 2")]
+    [InlineData("0, {|GAUSS008:0|}, 0, 2")]
+    [InlineData("1, 1, {|GAUSS017:double.NaN|}, 2")]
+    [InlineData("1, 1, 2, {|GAUSS016:2|}")]
+    [InlineData("1, 1, {|GAUSS018:-1 / 0.0|}, 1 / 0.0")]
+    [InlineData("1, 1, {|GAUSS029:100|}, 1 / 0.0")]
+    [InlineData("100, 1, 0, {|GAUSS029:50|}")]
+    [InlineData("0, 1, 0, 2, MaximumOrder = {|GAUSS009:101|}")]
+    [InlineData("1e100, 1e100, 0, 1e101, MaximumOrder = {|GAUSS011:4|}")]
+    public Task Truncated_normal_moments(string arguments) => Report($"TruncatedNormalMoments({arguments})", Uses.OfMoments);
+
+    [Theory]
+    [InlineData("{|GAUSS008:0|}")]
+    [InlineData("{|GAUSS008:double.NaN|}")]
+    [InlineData("1, MaximumOrder = {|GAUSS009:201|}")]
+    [InlineData("scale: 1e200, MaximumOrder = {|GAUSS011:4|}")]
+    public Task Half_normal_moments(string arguments) => Report($"HalfNormalMoments({arguments})", Uses.OfMoments);
+
+    [Theory]
     [InlineData("{|GAUSS026:-1|}")]
     [InlineData("{|GAUSS026:201|}")]
     [InlineData("maximumOrder: {|GAUSS028:172|}")]

@@ -71,6 +71,24 @@ public sealed class GoldenTests
         """));
 
     [Fact]
+    public void A_physicists_rule_with_an_error_estimate() => Verify("ErrorEstimate.txt", new Consumer(
+        """
+        using GaussGen;
+
+        [GaussHermite(2, Convention = HermiteConvention.Physicist, ErrorEstimate = true)]
+        internal static partial class Echo { }
+        """));
+
+    [Fact]
+    public void A_nested_rule_with_an_error_estimate() => Verify("NestedRule.txt", new Consumer(
+        """
+        using GaussGen;
+
+        [NestedHermite(1, ErrorEstimate = true)]
+        internal static partial class Echo { }
+        """));
+
+    [Fact]
     public void Lists_in_arrays() => Verify("Lists.txt", new Consumer(
         """
         using GaussGen;

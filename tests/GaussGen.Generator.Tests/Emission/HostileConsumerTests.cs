@@ -72,7 +72,7 @@ public sealed class HostileConsumerTests
             }
 
             /// <summary>Has tables.</summary>
-            [global::GaussGen.GaussHalfRangeHermite(3)]
+            [global::GaussGen.GaussHalfRangeHermite(3, ErrorEstimate = true)]
             [global::GaussGen.HalfIntegerGamma(3, Format = NumberFormat.Binary32)]
             [global::GaussGen.OscillatorMatrixElements(2, 3)]
             [global::GaussGen.LogNormalMoments(0, 0.5)]
@@ -92,11 +92,11 @@ public sealed class HostileConsumerTests
                 /// <summary>Not that one.</summary>
                 public static int error => 0;
 
-                private static double Of() => Expectation(2, x => x * x) + Nodes[0] + Raw[1] + Raw1 + Gamma[2] + Elements[3];
+                private static double Of() => ExpectationWithError(2, x => x * x, out _) + CompanionNodes[0] + Raw[1] + Raw1 + Gamma[2] + Elements[3];
             }
 
             #pragma warning disable CS3016 // arrays in attributes
-            [global::GaussGen.GaussEvenExponential(3, -2, 1)]
+            [global::GaussGen.GaussEvenExponential(3, -2, 1, ErrorEstimate = true)]
             #pragma warning restore CS3016
             internal static partial class Well
             {

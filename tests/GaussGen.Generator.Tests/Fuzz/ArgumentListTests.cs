@@ -91,8 +91,8 @@ public sealed class ArgumentListTests(ITestOutputHelper output)
 
     private static string Source(string attribute, int index)
     {
-        string use = attribute.StartsWith("Gauss", StringComparison.Ordinal) ? "Nodes.Length + Weights.Length + PointCount + DegreeOfExactness"
-            : attribute.StartsWith("Half", StringComparison.Ordinal) ? "Gamma.Length + Reciprocal.Length"
+        string use = attribute.StartsWith("Gauss", StringComparison.Ordinal) || attribute.StartsWith("Nested", StringComparison.Ordinal) ? "Nodes.Length + Weights.Length + PointCount + DegreeOfExactness"
+            : attribute.StartsWith("HalfInteger", StringComparison.Ordinal) ? "Gamma.Length + Reciprocal.Length"
             : attribute.StartsWith("Oscillator", StringComparison.Ordinal) ? "Elements.Length"
             : "Raw.Length + Central.Length + Absolute.Length + (int)Raw0";
         return string.Create(CultureInfo.InvariantCulture, $"using GaussGen;\n[{attribute}]\ninternal static partial class Echo{index} {{ internal static int Use() => {use}; }}\n");

@@ -45,7 +45,10 @@ internal static class NestedHermite
                     ? "the zero of the Hermite polynomial He₁"
                     : "the nodes of level " + Text(level - 1) + " and the " + count + " zeros of the polynomial that extends them",
                 Method(level, cancellation),
-                Sources),
+                Sources)
+            {
+                Variable = "a normal variable",
+            },
             rule.Nodes,
             rule.Weights,
             Degrees[level],

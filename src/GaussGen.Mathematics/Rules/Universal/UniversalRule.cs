@@ -9,7 +9,11 @@ namespace GaussGen.Mathematics.Rules.Universal;
 /// <param name="Title">See <see cref="RuleDescription.Title"/>.</param>
 /// <param name="Weight">See <see cref="RuleDescription.Weight"/>.</param>
 /// <param name="Sources">Sources beside those of the pipeline.</param>
-internal sealed record FamilyWords(string Title, string Weight, string Sources);
+internal sealed record FamilyWords(string Title, string Weight, string Sources)
+{
+    /// <summary>See <see cref="RuleDescription.Variable"/>; <c>null</c> for what follows from the weight.</summary>
+    internal string? Variable { get; init; }
+}
 
 /// <summary>From a weight function to a rule's table: the one pipeline of all families without a fast road of their own.</summary>
 internal static class UniversalRule
@@ -65,7 +69,7 @@ internal static class UniversalRule
     private static RuleDescription Describe(int points, MomentResiduals residuals, FamilyWords words)
     {
         string count = points.ToString(CultureInfo.InvariantCulture);
-        return new RuleDescription(
+        var description = new RuleDescription(
             words.Title,
             words.Weight,
             "the zeros of the orthogonal polynomial of degree " + count + " for this weight",
@@ -77,5 +81,6 @@ internal static class UniversalRule
                 (2 * points) - 1,
                 System.Math.Min(residuals.Bits, Formats.Rounding.FirstPrecision)),
             words.Sources + "; " + Sources);
+        return words.Variable is null ? description : description with { Variable = words.Variable };
     }
 }
