@@ -49,6 +49,7 @@ public sealed class AttributeTests
             new TruncatedNormalMomentsAttribute(mean: 1.0, standardDeviation: 2.0, lower: 0.0, upper: 4.0),
             new HalfNormalMomentsAttribute(scale: 0.5),
             new LogNormalMomentsAttribute(logMean: 0.0, logStandardDeviation: 0.25),
+            new EvenExponentialMomentsAttribute(1.0, 2.0),
             new HalfIntegerGammaAttribute(maximumOrder: 5),
             new OscillatorMatrixElementsAttribute(size: 5, power: 3),
         },

@@ -71,3 +71,6 @@ internal static partial class Depth;
 
 [HalfNormalMoments(scale: 0.75, MaximumOrder = 9)]
 internal static partial class RollMoments;
+
+[EvenExponentialMoments(-2.0, 1.0, MaximumOrder = 8)]
+internal static partial class PendulumMoments;

@@ -68,6 +68,8 @@ internal static class DeclarationTable
             read.Positive("logStandardDeviation"),
             read.MaximumOrder(LogNormalMomentsRequest.LargestOrder),
             read.Format())),
+        Family.OfMoments("EvenExponentialMoments", read => new EvenExponentialMomentsRequest(
+            read.Coefficients(), read.MaximumOrder(EvenExponentialMomentsRequest.LargestOrder), read.Format())),
         Family.OfSequences(
             "HalfIntegerGamma",
             read => new HalfIntegerGammaRequest(

@@ -26,6 +26,7 @@ public static class Samples
         ("HalfNormalMoments(0.5, MaximumOrder = 9)", "HalfNormalMoments(-0.5, MaximumOrder = 9)"),
         ("NormalMoments(0, 1, MaximumOrder = 9)", "NormalMoments(0, -1, MaximumOrder = 9)"),
         ("LogNormalMoments(0, 0.25, MaximumOrder = 9)", "LogNormalMoments(0, -1, MaximumOrder = 9)"),
+        ("EvenExponentialMoments(-2, 1)", "EvenExponentialMoments(1, -2)"),
         ("HalfIntegerGamma(10)", "HalfIntegerGamma(201)"),
         ("OscillatorMatrixElements(4, 3)", "OscillatorMatrixElements(4, -1)"),
     ];
@@ -48,6 +49,7 @@ public static class Samples
         "TruncatedNormalMoments(1, 2, 0, 4)",
         "HalfNormalMoments(0.5)",
         "LogNormalMoments(0, 0.25)",
+        "EvenExponentialMoments(-2, 1)",
     ];
 
     /// <summary>Tables that are lists.</summary>

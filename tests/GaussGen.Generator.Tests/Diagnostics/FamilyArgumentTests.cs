@@ -148,6 +148,15 @@ public sealed class FamilyArgumentTests
     public Task Truncated_normal_moments(string arguments) => Report($"TruncatedNormalMoments({arguments})", Uses.OfMoments);
 
     [Theory]
+    [InlineData("1, {|GAUSS023:-2|}")]
+    [InlineData("{|GAUSS019:null|}")]
+    [InlineData("{|GAUSS007:double.NaN|}, 1")]
+    [InlineData("coefficients: new double[] { 1, {|GAUSS023:0|} }")]
+    [InlineData("1, MaximumOrder = {|GAUSS009:101|}")]
+    [InlineData("1e-100, MaximumOrder = {|GAUSS011:8|}")]
+    public Task Even_exponential_moments(string arguments) => Report($"EvenExponentialMoments({arguments})", Uses.OfMoments);
+
+    [Theory]
     [InlineData("{|GAUSS008:0|}")]
     [InlineData("{|GAUSS008:double.NaN|}")]
     [InlineData("1, MaximumOrder = {|GAUSS009:201|}")]

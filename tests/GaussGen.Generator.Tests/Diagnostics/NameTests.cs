@@ -78,6 +78,7 @@ public sealed class NameTests
     [InlineData("GaussHalfRangeHermite(3), NormalMoments(0, 1), HalfIntegerGamma(2), OscillatorMatrixElements(2, 2)")]
     [InlineData("GaussHermite(3), {|GAUSS005:GaussHalfRangeHermite(3)|}")]
     [InlineData("GaussEvenExponential(3, 1), {|GAUSS005:GaussTruncatedNormal(3, 0, 1)|}, {|GAUSS005:GaussHermite(3)|}")]
+    [InlineData("GaussEvenExponential(3, 1), EvenExponentialMoments(1)")]
     [InlineData("LogNormalMoments(0, 1), {|GAUSS005:NormalMoments(0, 1)|}")]
     public Task Tables_beside_each_other(string attributes) => DeclarationTest.Report(
         $$"""

@@ -65,7 +65,7 @@ internal sealed class ArgumentListSource(Random random)
             Setting("Format", "NumberFormat"), $"DropZeroWeights = {Pick(["true", "false"])}", $"ErrorEstimate = {Pick(["true", "false"])}",
         ];
         string after = string.Concat(settings.Where(_ => random.Next(3) == 0).Select(setting => ", " + setting));
-        return random.Next(12) switch
+        return random.Next(13) switch
         {
             0 => ("GaussHalfRangeHermite", first + after),
             1 => ("GaussTruncatedNormal", $"{first}, {real}, {Perhaps(Pick(Reals))}{after}"),
@@ -78,6 +78,7 @@ internal sealed class ArgumentListSource(Random random)
             8 => ("NestedHermite", first + after),
             9 => ("TruncatedNormalMoments", $"{real}, {Perhaps(Pick(Reals))}, {Perhaps(Pick(Reals))}, {Perhaps(Pick(Reals))}"),
             10 => ("HalfNormalMoments", real),
+            11 => ("EvenExponentialMoments", Perhaps(Pick([.. Lists, "1, 2", "-1.0, Known.Half", "0, 0, 1"]))),
             _ => ("OscillatorMatrixElements", $"{first}, {Perhaps(Integer())}"),
         };
     }
