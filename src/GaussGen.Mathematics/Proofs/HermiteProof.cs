@@ -2,6 +2,7 @@ using System;
 using System.Collections.Generic;
 using System.Threading;
 using GaussGen.Mathematics.Arithmetic;
+using GaussGen.Mathematics.Proofs.Gauss;
 
 namespace GaussGen.Mathematics.Proofs;
 
@@ -27,6 +28,9 @@ namespace GaussGen.Mathematics.Proofs;
 /// With zero weights dropped, the weight of every zero is enclosed, also of those that were left out; exactly those that do not
 /// round to zero are expected.
 /// </description></item>
+/// <item><description>
+/// A companion rule goes the road of all other rules (<see cref="RuleSearch"/>).
+/// </description></item>
 /// </list>
 /// </remarks>
 internal sealed class HermiteProof
@@ -48,6 +52,7 @@ internal sealed class HermiteProof
 
     public TableProof Run(IProgress<double>? progress, CancellationToken cancellation)
     {
+        double share = _claim.HasErrorEstimate ? 0.5 : 1;
         int half = _claim.Points / 2;
         int first = 1 - (_claim.Points & 1);
         var outward = new List<(KnownNumber Node, KnownNumber Weight)>();
@@ -67,7 +72,7 @@ internal sealed class HermiteProof
                 outward.Add(entry);
             }
 
-            progress?.Report((rank - first + 1) / (double)(half - first + 1));
+            progress?.Report(share * (rank - first + 1) / (half - first + 1));
         }
 
         List<(KnownNumber Node, KnownNumber Weight)> ascending = Mirror(outward);
@@ -78,9 +83,30 @@ internal sealed class HermiteProof
         _report.Entries("Nodes", _foundNodes, nodes);
         _report.Entries("Weights", _foundWeights, weights);
         JudgeScaling(cancellation);
-        return _report.Finish(_report.IsClean
-            ? new HermiteMomentEquations(_claim).Check(_foundNodes, _foundWeights, dropped, beyond, cancellation)
-            : []);
+        var judge = new RuleJudge(_report, _claim.Format, _claim.DropZeroWeights);
+        FoundRule? companion = _claim.HasErrorEstimate ? JudgeCompanion(judge, progress, cancellation) : null;
+        if (!_report.IsClean)
+        {
+            return _report.Finish([]);
+        }
+
+        IReadOnlyList<MomentEquation> equations =
+            new HermiteMomentEquations(_claim).Check(_foundNodes, _foundWeights, dropped, beyond, cancellation);
+        return _report.Finish(companion is null
+            ? equations
+            : [.. equations, .. judge.Equations(companion, _claim.Points, cancellation)]);
+    }
+
+    private FoundRule JudgeCompanion(RuleJudge judge, IProgress<double>? progress, CancellationToken cancellation)
+    {
+        _report.Constant("ErrorFactor", Known(Ball.FromDyadic(new Dyadic(1, -1))), isRequired: false);
+        return judge.Judge(
+            new HermiteAntiGaussSource(_claim.Points, _claim.Weight),
+            "CompanionNodes",
+            "CompanionWeights",
+            null,
+            part => progress?.Report(0.5 + (0.5 * part)),
+            cancellation);
     }
 
     /// <summary>

@@ -15,12 +15,14 @@ namespace GaussGen.Mathematics.Proofs.Gauss;
 /// With w and x the true values, w̃ and x̃ the entries, |w − w̃| ≤ a and |x − x̃| ≤ b, each term differs by at most
 /// (|w̃| + a)(|x̃| + b)ᵏ − |w̃| |x̃|ᵏ; both sums are exact.
 /// </remarks>
-internal sealed class RuleMomentEquations(WeightMoments moments, BinaryFormat format, int degreeOfExactness)
+internal sealed class RuleMomentEquations(RuleSource source, BinaryFormat format, int degreeOfExactness)
 {
     /// <summary>The highest degree that is checked.</summary>
     private const int HighestDegree = 8;
 
     private const int Precision = 256;
+
+    private readonly WeightMoments _moments = source.Moments;
 
     /// <summary>
     /// The equations as far as the rule is exact and <see cref="HighestDegree"/> allows, without those that hold by symmetry.
@@ -35,7 +37,7 @@ internal sealed class RuleMomentEquations(WeightMoments moments, BinaryFormat fo
         var equations = new List<MomentEquation>();
         int highest = Math.Min(HighestDegree, degreeOfExactness);
         Ball[] right = AboutZero(highest + 1, cancellation);
-        int step = moments.IsEven && moments.Center.IsZero ? 2 : 1;
+        int step = _moments.IsEven && _moments.Center.IsZero ? 2 : 1;
         for (int degree = 0; degree <= highest; degree += step)
         {
             Dyadic sum = Dyadic.Zero, size = Dyadic.Zero, allowance = Dyadic.Zero;
@@ -80,17 +82,20 @@ internal sealed class RuleMomentEquations(WeightMoments moments, BinaryFormat fo
     /// <summary>The moments about zero, by the binomial theorem from those about c.</summary>
     private Ball[] AboutZero(int count, CancellationToken cancellation)
     {
-        Ball[] about = moments.Enclose(count, Precision, cancellation);
+        Ball[] about = _moments.Enclose(count, Precision, cancellation);
+        Ball total = source.Total(Precision, cancellation);
         var result = new Ball[count];
         for (int k = 0; k < count; k++)
         {
             BigInteger binomial = BigInteger.One;
             for (int j = k; j >= 0; j--)
             {
-                Dyadic factor = Power(moments.Center, k - j) * new Dyadic(binomial, 0);
+                Dyadic factor = Power(_moments.Center, k - j) * new Dyadic(binomial, 0);
                 result[k] = Ball.Add(result[k], Ball.Multiply(about[j], Ball.FromDyadic(factor), Precision), Precision);
                 binomial = binomial * j / (k - j + 1);
             }
+
+            result[k] = Ball.Multiply(result[k], total, Precision);
         }
 
         return result;

@@ -37,6 +37,7 @@ internal sealed class RuleSearch
     private List<RuleZero>? _zeros;
     private KnownEntry?[] _known = [];
     private KnownNumber? _centerWeight;
+    private int _decided;
 
     public RuleSearch(RuleSource source, BinaryFormat format)
     {
@@ -51,6 +52,17 @@ internal sealed class RuleSearch
     /// <param name="progress">Told the finished fraction.</param>
     /// <param name="cancellation">Looked at in each step.</param>
     public List<KnownEntry>? Find(IReadOnlyList<ulong> hints, Action<double> progress, CancellationToken cancellation)
+    {
+        List<KnownEntry>? entries = Search(hints, progress, cancellation);
+        if (_decided == 0 || _decided != _zeros?.Count)
+        {
+            progress(1);
+        }
+
+        return entries;
+    }
+
+    private List<KnownEntry>? Search(IReadOnlyList<ulong> hints, Action<double> progress, CancellationToken cancellation)
     {
         int precision = FirstPrecision();
         while (precision <= LargestPrecision)
@@ -88,14 +100,23 @@ internal sealed class RuleSearch
         bool isExactKnown = false;
         for (int index = 0; index < _zeros!.Count; index++)
         {
+            if (IsDecided(index))
+            {
+                continue;
+            }
+
             if (!Decide(index, level, cancellation))
             {
                 exact = isExactKnown ? exact : _source.Exact(cancellation);
                 isExactKnown = true;
-                isComplete &= exact is not null && DecideExactly(index, exact);
+                if (exact is null || !DecideExactly(index, exact))
+                {
+                    isComplete = false;
+                    continue;
+                }
             }
 
-            progress((index + 1.0) / _zeros.Count);
+            progress(++_decided / (double)_zeros.Count);
         }
 
         if (_source.HasCenterNode && _centerWeight?.Bits is null)
@@ -104,6 +125,7 @@ internal sealed class RuleSearch
             if (_centerWeight.Bits is null)
             {
                 exact = isExactKnown ? exact : _source.Exact(cancellation);
+                isExactKnown = true;
                 _centerWeight = exact is null ? _centerWeight : Known(exact.CenterWeight);
                 isComplete &= _centerWeight.Bits is not null;
             }

@@ -40,6 +40,9 @@ internal abstract class RuleSource(WeightMoments moments, int points)
     /// <summary>The number of zeros in the rule's coordinate.</summary>
     public int Zeros => Moments.IsEven ? Points / 2 : Points;
 
+    /// <summary>The sum of all weights: 1, unless the rule is one of a weight function that is no density.</summary>
+    public virtual Ball Total(int precision, CancellationToken cancellation) => Ball.FromInteger(1);
+
     /// <summary>The polynomial at a working precision; <c>null</c> where that does not suffice.</summary>
     /// <param name="precision">In bits.</param>
     /// <param name="cancellation">Looked at in each step.</param>
@@ -79,6 +82,12 @@ internal abstract class RuleSource(WeightMoments moments, int points)
     /// <summary>The level that a polynomial in the rule's coordinate gives.</summary>
     protected RuleLevel Level(Ball[] coefficients, Ball[] moments, ZeroCount? count, int precision, CancellationToken cancellation)
     {
+        Ball total = Total(precision, cancellation);
+        if (!total.IsExact)
+        {
+            moments = System.Array.ConvertAll(moments, moment => Ball.Multiply(moment, total, precision));
+        }
+
         Ball[] functional = InCoordinate(moments, Moments.IsEven, Parity);
         Ball center = default;
         if (HasCenterNode)

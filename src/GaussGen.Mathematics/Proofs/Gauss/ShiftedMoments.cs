@@ -20,14 +20,10 @@ internal static class ShiftedMoments
     /// <returns>The moments; where so many bits would be too many, with what they have.</returns>
     public static Ball[] Of(Func<int, CancellationToken, Ball[]> about, Dyadic center, int precision, CancellationToken cancellation)
     {
-        if (center.IsZero)
+        for (int bits = center.IsZero ? precision + 16 : 2 * precision; ; bits *= 2)
         {
-            return about(precision, cancellation);
-        }
-
-        for (int bits = precision * 2; ; bits *= 2)
-        {
-            Ball[] shifted = Shift(about(bits, cancellation), Ball.FromDyadic(center), bits, cancellation);
+            Ball[] moments = about(bits, cancellation);
+            Ball[] shifted = center.IsZero ? moments : Shift(moments, Ball.FromDyadic(center), bits, cancellation);
             int accuracy = int.MaxValue;
             for (int k = 0; k < shifted.Length; k += 2)
             {
