@@ -125,7 +125,6 @@ internal sealed class RuleSearch
             if (_centerWeight.Bits is null)
             {
                 exact = isExactKnown ? exact : _source.Exact(cancellation);
-                isExactKnown = true;
                 _centerWeight = exact is null ? _centerWeight : Known(exact.CenterWeight);
                 isComplete &= _centerWeight.Bits is not null;
             }
