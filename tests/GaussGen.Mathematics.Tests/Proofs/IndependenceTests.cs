@@ -39,6 +39,11 @@ public class IndependenceTests
         Assert.Contains(reached, type => type.Name == "BinaryFormat");
         Assert.Contains("GaussGen.Mathematics.Proofs", namespaces);
         Assert.Contains("GaussGen.Mathematics.Proofs.Gauss", namespaces);
+        foreach (string road in new[] { "HankelFactors", "NestedSource", "HermiteAntiGaussSource", "TruncatedNormalMoments", "PanelSeries", "RuleZero" })
+        {
+            Assert.Contains(reached, type => type.Name == road);
+        }
+
     }
 
     [Fact]

@@ -30,6 +30,9 @@ internal sealed class RuleSearch
     /// <summary>Where the search gives up, in bits of working precision.</summary>
     public const int LargestPrecision = 1 << 13;
 
+    /// <summary>How often a zero is narrowed with one precision: enough to tell 0 from the smallest number above it.</summary>
+    private const int MostSteps = 512;
+
     private readonly RuleSource _source;
     private readonly BinaryFormat _format;
     private readonly NodeCoordinate _coordinate;
@@ -137,7 +140,7 @@ internal sealed class RuleSearch
     private bool Decide(int index, RuleLevel level, CancellationToken cancellation)
     {
         RuleZero zero = _zeros![index];
-        while (!IsDecided(index))
+        for (int step = 0; !IsDecided(index); step++)
         {
             Ball enclosure = zero.Enclosure;
             if (enclosure.RelativeAccuracyBits >= _format.Precision + 8 + _source.Zeros || enclosure.ContainsZero)
@@ -145,7 +148,8 @@ internal sealed class RuleSearch
                 Evaluate(index, enclosure, level);
             }
 
-            if (!IsDecided(index) && !zero.Narrow(level.Polynomial, cancellation))
+            // Where coefficients are exact, signs are known however near the zero: the interval would shrink without end around a zero half-way.
+            if (!IsDecided(index) && (step == MostSteps || !zero.Narrow(level.Polynomial, cancellation)))
             {
                 return false;
             }

@@ -1,3 +1,4 @@
+using System;
 using System.Collections.Generic;
 using System.Threading;
 using GaussGen.Mathematics.Arithmetic;
@@ -61,6 +62,11 @@ internal sealed class ZeroCount(Ball[] diagonal, Ball[] squares, int precision)
     /// <param name="cancellation">Looked at before each count.</param>
     public List<(Dyadic Low, Dyadic High)>? Isolate(CancellationToken cancellation)
     {
+        if (Array.Exists(diagonal, value => !value.IsFinite) || Array.Exists(squares, value => !value.IsFinite))
+        {
+            return null;
+        }
+
         (Dyadic low, Dyadic high) = Range();
         if (Above(low) != diagonal.Length || Above(high) != 0)
         {

@@ -25,6 +25,12 @@ public sealed record RuleFamily(
         Mixture("mixture", [0.7, 0.2, 0.1], [0, 1.5, -3], [1, 0.25, 2]),
         Mixture("mixture, symmetric about 1.5", [1, 3, 1], [-0.5, 1.5, 3.5], [0.5, 1, 0.5]),
         Mixture("mixture, far apart", [0.5, 0.25], [0, 100], [1, 1]),
+        Truncated("truncated", -1, 2),
+        Truncated("truncated, symmetric", -1.5, 1.5),
+        Truncated("truncated, far tail", 8, double.PositiveInfinity),
+        EvenExponential("even exponential, normal", 0.75),
+        EvenExponential("even exponential, quartic", 0, 1),
+        EvenExponential("even exponential, double well", -3, 0.5),
         new(
             "half-range",
             (points, format, drop, estimate) => new GaussHalfRangeHermiteClaim(points, format, drop, estimate),
@@ -64,6 +70,16 @@ public sealed record RuleFamily(
         name,
         (points, format, drop, estimate) => new GaussGeneralizedHermiteClaim(points, exponent, format, drop, estimate),
         (points, format, drop) => new GaussGeneralizedHermiteRequest(points, exponent, format, drop));
+
+    private static RuleFamily Truncated(string name, double lower, double upper) => new(
+        name,
+        (points, format, drop, estimate) => new GaussTruncatedNormalClaim(points, lower, upper, format, drop, estimate),
+        (points, format, drop) => new GaussTruncatedNormalRequest(points, lower, upper, format, drop));
+
+    private static RuleFamily EvenExponential(string name, params double[] coefficients) => new(
+        name,
+        (points, format, drop, estimate) => new GaussEvenExponentialClaim(points, coefficients, format, drop, estimate),
+        (points, format, drop) => new GaussEvenExponentialRequest(points, new ValueList(coefficients), format, drop));
 
     private static RuleFamily LogNormal(string name, double mean, double deviation) => new(
         name,

@@ -34,7 +34,7 @@ public class RuleTamperingTests
                         ulong right = data.Entries(span)[index];
                         AssertOneWrong(claim, data, span, index, format.Next(right));
                         AssertOneWrong(claim, data, span, index, format.Previous(right));
-                        for (int bit = index % 3; bit < format.StorageBits; bit += 3)
+                        for (int bit = index; bit < format.StorageBits; bit += 9)
                         {
                             AssertOneWrong(claim, data, span, index, right ^ (1UL << bit));
                         }
@@ -135,6 +135,26 @@ public class RuleTamperingTests
                 Assert.Equal((member, right), Failure(claim.Prove(with.WithConstant(member, wrong))));
             }
         }
+    }
+
+    [Fact]
+    public void The_normalizing_integral_is_judged()
+    {
+        RuleFamily family = RuleFamily.Named("even exponential, quartic");
+        TableClaim claim = family.Claim(2, BinaryFormat.Binary64, false, false);
+        TableData data = family.Data(2, BinaryFormat.Binary64);
+        // ∫ exp(−x⁴) dx = 2Γ(5/4) = 1.81280495411095415596… (recalled; Γ(1/4)/2, OEIS A068466 halved).
+        ulong right = BitConverter.DoubleToUInt64Bits(1.81280495411095415596);
+        Assert.Equal(right, data.Constants.Single(constant => constant.Name == "NormalizingIntegral").Bits);
+        foreach (ulong wrong in new[] { right + 1, right - 1, right ^ (1UL << 63), right ^ (1UL << 50), 0UL })
+        {
+            Assert.Equal(("NormalizingIntegral", right), Failure(claim.Prove(data.WithConstant("NormalizingIntegral", wrong))));
+        }
+
+        AssertFault(
+            claim,
+            data with { Constants = data.Constants.Where(constant => constant.Name != "NormalizingIntegral").ToList() },
+            "NormalizingIntegral is missing.");
     }
 
     internal static void AssertOneWrong(TableClaim claim, TableData data, string span, int index, ulong bits)
