@@ -17,6 +17,11 @@ namespace GaussGen.Mathematics.Proofs.Integrals;
 /// What lies beyond a reach R is bounded: yᵏ exp(−cy − y²/2) has the logarithmic derivative k/y − c − y, which falls, so that beyond R
 /// the function is at most its value there times exp(−d(y − R)) with d = c + R − k/R, and the integral at most that value over d, for d > 0.
 /// </para>
+/// <para>
+/// The series is summed at the midpoints of c and L, for its cancellation would blow up their radii. Where c is off by at most r, the integral
+/// is off by at most r exp(rL) times that of the next power, because |exp(−δy) − 1| ≤ |δ| y exp(|δ|y); where L is, by at most the radius
+/// times the largest value of the integrand near L.
+/// </para>
 /// </remarks>
 internal static class TruncatedPowers
 {
@@ -50,14 +55,17 @@ internal static class TruncatedPowers
     public static Ball[] OneSided(Ball slope, Ball? length, int count, int precision, CancellationToken cancellation)
     {
         int aim = precision + 40;
+        int before = int.MinValue;
         for (int attempt = 1; ; attempt++)
         {
             Ball[] integrals = OnceOneSided(slope, length, count, aim, cancellation);
             int accuracy = LeastAccuracy(integrals);
-            if (accuracy >= precision || attempt == MaximumAttempts)
+            if (accuracy >= precision || attempt == MaximumAttempts || accuracy <= before)
             {
                 return integrals;
             }
+
+            before = accuracy;
 
             aim = checked(aim + Math.Min(precision - accuracy, 2 * aim) + 8);
         }
@@ -78,28 +86,52 @@ internal static class TruncatedPowers
         }
 
         int bits = plan.Bits;
-        Ball end = plan.IsCut || length is null ? Ball.FromDyadic(Estimate.Exactly(plan.Reach)) : length.Value;
-        Ball first = Ball.Multiply(slope, end, bits + 16);
+        bool isCut = plan.IsCut || length is null;
+        Ball end = Ball.FromDyadic(isCut ? Estimate.Exactly(plan.Reach) : length!.Value.Center);
+        Ball first = Ball.Multiply(Ball.FromDyadic(slope.Center), end, bits + 16);
         Ball second = Ball.Square(end, bits + 16).ScaleByPowerOfTwo(-1);
         var series = new ExponentialSeries([first, second], bits, cancellation);
-        Bound last = plan.IsCut ? Above(Elementary.Exp(Ball.Negate(Ball.Add(first, second, 64)), 64, cancellation)) : default;
+
+        // The density at the end, for every argument in the balls.
+        Ball edge = isCut ? end : length!.Value;
+        Ball exponent = Ball.Add(Ball.Multiply(slope, edge, 64), Ball.Square(edge, 64).ScaleByPowerOfTwo(-1), 64);
+        Bound last = Above(Elementary.Exp(Ball.Negate(exponent), 64, cancellation));
+        Bound vague = slope.Radius * Growth(slope.Radius, end.Center, cancellation);
+        Bound furthest = Bound.PowerOfTwo(0);
         Ball power = end;
+        Ball value = Ball.Multiply(power, series.FromZero(0), aim + 32);
         for (int k = 0; k < count; k++)
         {
             cancellation.ThrowIfCancellationRequested();
-            Ball value = Ball.Multiply(power, series.FromZero(k), aim + 32);
-            integrals[k] = plan.IsCut ? value.Enlarge(Beyond(slope, end, power, last, k)) : value;
-            power = Ball.Multiply(power, end, aim + 32);
+            Ball above = Ball.Multiply(power = Ball.Multiply(power, end, aim + 32), series.FromZero(k + 1), aim + 32);
+            Bound missing = isCut ? Beyond(slope, end, Above(end) * furthest, last, k) : edge.Radius * furthest * last;
+            integrals[k] = value.Enlarge((vague * Above(above)) + missing);
+            furthest *= Above(edge);
+            value = above;
         }
 
         return integrals;
     }
 
+    /// <summary>exp(rL) or more.</summary>
+    private static Bound Growth(Bound radius, Dyadic end, CancellationToken cancellation)
+    {
+        if (radius.IsZero)
+        {
+            return Bound.PowerOfTwo(0);
+        }
+
+        Dyadic exponent = radius.ToDyadic() * end;
+        return exponent > new Dyadic(1, 20)
+            ? Bound.Infinite
+            : Above(Elementary.Exp(Ball.FromDyadic(exponent), 64, cancellation));
+    }
+
     /// <summary>R^(k+1) exp(−cR − R²/2) / (R(c + R) − k), or no bound where the divisor may not be above zero.</summary>
-    private static Bound Beyond(Ball slope, Ball end, Ball power, Bound last, int k)
+    private static Bound Beyond(Ball slope, Ball end, Bound power, Bound last, int k)
     {
         Ball divisor = Ball.Subtract(Ball.Multiply(end, Ball.Add(slope, end, 64), 64), Ball.FromInteger(k), 64);
-        return divisor.IsPositive == Trilean.True ? Bound.DivideByAtLeast(Above(power) * last, divisor.Lower) : Bound.Infinite;
+        return divisor.IsPositive == Trilean.True ? Bound.DivideByAtLeast(power * last, divisor.Lower) : Bound.Infinite;
     }
 
     private static Bound Above(Ball value) => Bound.FromMagnitude(value.Midpoint, value.Exponent) + value.Radius;
