@@ -170,12 +170,12 @@ public class CompanionProofTests
         }
     }
 
-    private static TableData HermiteData(int points, HermiteWeight weight, BinaryFormat format, bool drop) => RuleFamily.Data(
-        new GaussHermiteRequest(
-            points,
-            weight == HermiteWeight.StandardNormalDensity ? HermiteConvention.Probabilist : HermiteConvention.Physicist,
-            format,
-            drop) with { ErrorEstimate = true });
+    private static TableData HermiteData(int points, HermiteWeight weight, BinaryFormat format, bool drop)
+    {
+        HermiteConvention convention = weight == HermiteWeight.StandardNormalDensity ? HermiteConvention.Probabilist : HermiteConvention.Physicist;
+        var request = new GaussHermiteRequest(points, convention, format, drop);
+        return RuleFamily.Data(request with { ErrorEstimate = true });
+    }
 
     private static double Sum(TableData data, string nodes, string weights, int degree)
     {
