@@ -12,17 +12,37 @@ internal static class ClaimTable
     private static readonly FrozenDictionary<string, ClaimFamily> Families = new[]
     {
         ClaimFamily.Rule("GaussHermite", SumForm.Located, read => new GaussHermiteClaim(
-            read.Next<int>(), Weight(read), read.Format(), read.DropZeroWeights())),
+            read.Next<int>(), Weight(read), read.Format(), read.DropZeroWeights(), read.HasErrorEstimate())),
         ClaimFamily.Rule("GaussHalfRangeHermite", SumForm.ScaleOnly, read => new GaussHalfRangeHermiteClaim(
             read.Next<int>(), read.Format(), read.DropZeroWeights(), read.HasErrorEstimate())),
+        ClaimFamily.Rule("GaussTruncatedNormal", SumForm.Fixed, read => new GaussTruncatedNormalClaim(
+            read.Next<int>(), read.Next<double>(), read.Next<double>(), read.Format(), read.DropZeroWeights(), read.HasErrorEstimate())),
         ClaimFamily.Rule("GaussGeneralizedHermite", SumForm.Fixed, read => new GaussGeneralizedHermiteClaim(
             read.Next<int>(), read.Next<double>(), read.Format(), read.DropZeroWeights(), read.HasErrorEstimate())),
         ClaimFamily.Rule("GaussLogNormal", SumForm.Fixed, read => new GaussLogNormalClaim(
             read.Next<int>(), read.Next<double>(), read.Next<double>(), read.Format(), read.DropZeroWeights(), read.HasErrorEstimate())),
         ClaimFamily.Rule("GaussNormalMixture", SumForm.Fixed, read => new GaussNormalMixtureClaim(
             read.Next<int>(), read.NextList(), read.NextList(), read.NextList(), read.Format(), read.DropZeroWeights(), read.HasErrorEstimate())),
+        ClaimFamily.Rule("GaussEvenExponential", SumForm.Fixed, read => new GaussEvenExponentialClaim(
+            read.Next<int>(), read.NextList(), read.Format(), read.DropZeroWeights(), read.HasErrorEstimate())) with
+        {
+            Constants = ["NormalizingIntegral"],
+        },
+        ClaimFamily.Rule("NestedHermite", SumForm.Located, read => new NestedHermiteClaim(
+            read.Next<int>(), read.Format(), read.DropZeroWeights(), read.HasErrorEstimate())),
         ClaimFamily.Moments("NormalMoments", read => new NormalMomentsClaim(
             read.Next<double>(), read.Next<double>(), read.MaximumOrder(), read.Format())),
+        ClaimFamily.Moments("TruncatedNormalMoments", read => new TruncatedNormalMomentsClaim(
+            read.Next<double>(), read.Next<double>(), read.Next<double>(), read.Next<double>(), read.MaximumOrder(), read.Format())),
+        ClaimFamily.Moments("HalfNormalMoments", read => new HalfNormalMomentsClaim(
+            read.Next<double>(), read.MaximumOrder(), read.Format())),
+        ClaimFamily.Moments("LogNormalMoments", read => new LogNormalMomentsClaim(
+            read.Next<double>(), read.Next<double>(), read.MaximumOrder(), read.Format())),
+        ClaimFamily.Moments("EvenExponentialMoments", read => new EvenExponentialMomentsClaim(
+            read.NextList(), read.MaximumOrder(), read.Format())),
+        ClaimFamily.Sequences("HalfIntegerGamma", ["Gamma", "Reciprocal"], read => new HalfIntegerGammaClaim(read.Next<int>(), read.Format())),
+        ClaimFamily.Sequences("OscillatorMatrixElements", ["Elements"], read => new OscillatorMatrixElementsClaim(
+            read.Next<int>(), read.Next<int>(), read.Format())),
     }.ToFrozenDictionary(family => family.Attribute, StringComparer.Ordinal);
 
     /// <summary>The attributes of all families.</summary>

@@ -17,21 +17,38 @@ internal static class AdHocOptions
         ["gauss-hermite"] = read => AdHocTable.GaussHermite(
             read.Integer("--points"), read.IsSecond("--convention", "probabilist", "physicist"), Rule(read)),
         ["gauss-half-range-hermite"] = read => AdHocTable.GaussHalfRangeHermite(read.Integer("--points"), Rule(read)),
+        ["gauss-truncated-normal"] = read => AdHocTable.GaussTruncatedNormal(
+            read.Integer("--points"), read.End("--lower", double.NegativeInfinity), read.End("--upper", double.PositiveInfinity), Rule(read)),
         ["gauss-generalized-hermite"] = read => AdHocTable.GaussGeneralizedHermite(read.Integer("--points"), read.Number("--exponent"), Rule(read)),
         ["gauss-log-normal"] = read => AdHocTable.GaussLogNormal(
             read.Integer("--points"), read.Number("--log-mean"), read.Number("--log-standard-deviation"), Rule(read)),
         ["gauss-normal-mixture"] = read => AdHocTable.GaussNormalMixture(
             read.Integer("--points"), read.List("--weights"), read.List("--means"), read.List("--standard-deviations"), Rule(read)),
+        ["gauss-even-exponential"] = read => AdHocTable.GaussEvenExponential(read.Integer("--points"), read.List("--coefficients"), Rule(read)),
+        ["nested-hermite"] = read => AdHocTable.NestedHermite(read.Integer("--level"), Rule(read)),
     }.ToFrozenDictionary(StringComparer.Ordinal);
 
     private static readonly FrozenDictionary<string, Func<OptionValues, AdHocTable>> Moments = new Dictionary<string, Func<OptionValues, AdHocTable>>
     {
         ["normal"] = read => AdHocTable.NormalMoments(
             read.Number("--mean"), read.Number("--standard-deviation"), Order(read), read.Format()),
+        ["truncated-normal"] = read => AdHocTable.TruncatedNormalMoments(
+            read.Number("--mean"),
+            read.Number("--standard-deviation"),
+            read.End("--lower", double.NegativeInfinity),
+            read.End("--upper", double.PositiveInfinity),
+            Order(read),
+            read.Format()),
+        ["half-normal"] = read => AdHocTable.HalfNormalMoments(read.Number("--scale"), Order(read), read.Format()),
+        ["log-normal"] = read => AdHocTable.LogNormalMoments(
+            read.Number("--log-mean"), read.Number("--log-standard-deviation"), Order(read), read.Format()),
+        ["even-exponential"] = read => AdHocTable.EvenExponentialMoments(read.List("--coefficients"), Order(read), read.Format()),
     }.ToFrozenDictionary(StringComparer.Ordinal);
 
     private static readonly FrozenDictionary<string, Func<OptionValues, AdHocTable>> Sequences = new Dictionary<string, Func<OptionValues, AdHocTable>>
     {
+        ["half-integer-gamma"] = read => AdHocTable.HalfIntegerGamma(read.Integer("--maximum-order"), read.Format()),
+        ["oscillator-matrix-elements"] = read => AdHocTable.OscillatorMatrixElements(read.Integer("--size"), read.Integer("--power"), read.Format()),
     }.ToFrozenDictionary(StringComparer.Ordinal);
 
     /// <summary>The names of the tables that can be made, by the option that takes them.</summary>

@@ -34,10 +34,19 @@ internal sealed record Explanation(
     {
         GaussHermiteClaim hermite => HermiteExplanation.Of(hermite),
         GaussHalfRangeHermiteClaim half => GaussRuleExplanation.Of(half),
+        GaussTruncatedNormalClaim truncated => GaussRuleExplanation.Of(truncated),
         GaussGeneralizedHermiteClaim generalized => GaussRuleExplanation.Of(generalized),
         GaussLogNormalClaim logNormal => GaussRuleExplanation.Of(logNormal),
         GaussNormalMixtureClaim mixture => GaussRuleExplanation.Of(mixture),
+        GaussEvenExponentialClaim even => GaussRuleExplanation.Of(even),
+        NestedHermiteClaim nested => NestedHermiteExplanation.Of(nested),
         NormalMomentsClaim moments => MomentsExplanation.Of(moments),
+        TruncatedNormalMomentsClaim moments => MomentsExplanation.Of(moments),
+        HalfNormalMomentsClaim moments => MomentsExplanation.Of(moments),
+        LogNormalMomentsClaim moments => MomentsExplanation.Of(moments),
+        EvenExponentialMomentsClaim moments => MomentsExplanation.Of(moments),
+        HalfIntegerGammaClaim gamma => SequencesExplanation.Of(gamma),
+        OscillatorMatrixElementsClaim oscillator => SequencesExplanation.Of(oscillator),
         _ => throw new NotSupportedException("A family without an explanation: " + claim.Title),
     };
 

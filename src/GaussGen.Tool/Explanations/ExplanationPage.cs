@@ -113,8 +113,16 @@ internal sealed record ExplanationPage(string Name, TableProof Proof, string Dig
         yield return new PageLine("");
         yield return new PageLine("Moment equations Σ wᵢ xᵢᵏ = ∫ xᵏ w(x) dx" + (isEven ? "; odd k hold by symmetry" : ""), Heading);
         yield return new PageLine("   k   relative residual at most   allowed by rounding");
+        int last = -1;
         foreach (MomentEquation equation in Proof.MomentEquations)
         {
+            // The companion's equations follow those of the rule, from the lowest degree on.
+            if (equation.Degree <= last)
+            {
+                yield return new PageLine("     of the companion:");
+            }
+
+            last = equation.Degree;
             yield return new PageLine(
                 $"{equation.Degree,4}   {Residual(equation.Residual),-25}   {Residual(equation.Allowance),-19}   {(equation.Holds ? "holds" : "DOES NOT HOLD")}",
                 equation.Holds ? default(Style?) : Bad);
@@ -134,11 +142,13 @@ internal sealed record ExplanationPage(string Name, TableProof Proof, string Dig
         double[] abscissas = wanted.Abscissas is { } member ? [.. Values(member)] : [.. Enumerable.Range(0, values.Length).Select(order => (double)order)];
         TerminalStemPlot plot = new([.. abscissas.Zip(values).Where(point => double.IsFinite(point.First))], Width, PlotHeight);
         IReadOnlyList<string> lines = plot.Draw(IsUnicode);
+        int below = values.Count(value => value < 0);
         return lines.Count == 0 ? []
             : [
                 new PageLine(""),
                 new PageLine(wanted.Title + (plot.IsLogarithmic ? ", on a logarithmic scale" : ""), Heading),
                 .. lines.Select(line => new PageLine(line)),
+                .. below == 0 ? [] : new[] { new PageLine($"Without a stem: {below.ToString(CultureInfo.InvariantCulture)} below zero.") },
             ];
     }
 

@@ -20,6 +20,19 @@ internal static class GaussRuleExplanation
         ],
         "Steen, Byrne and Gelbard, Mathematics of Computation 23 (1969)");
 
+    /// <summary>The normal density on an interval.</summary>
+    public static Explanation Of(GaussTruncatedNormalClaim claim) => Rule(
+        claim.Points,
+        claim.HasErrorEstimate,
+        Interval(claim.Lower, claim.Upper),
+        [
+            "w(x) = exp(−x²/2)/∫ exp(−t²/2) dt, the integral over the same interval.",
+            $"Lower end {Exactly(claim.Lower)}; upper end {Exactly(claim.Upper)}.",
+            "For a normal variable with mean m and standard deviation s that is known to lie between a and b, the ends are (a − m)/s and "
+                + "(b − m)/s, and E f(X) ≈ Σ wᵢ f(m + s xᵢ).",
+        ],
+        "Tallis, The moment generating function of the truncated multi-normal distribution (1961)");
+
     /// <summary>A power of |x| times exp(−x²).</summary>
     public static Explanation Of(GaussGeneralizedHermiteClaim claim) => Rule(
         claim.Points,
@@ -66,6 +79,18 @@ internal static class GaussRuleExplanation
             "Each of these numbers means the exact value of a binary64 number.",
         ],
         "Stein, Estimation of the mean of a multivariate normal distribution (1981), for the moments");
+
+    /// <summary>An exponential of an even polynomial.</summary>
+    public static Explanation Of(GaussEvenExponentialClaim claim) => Rule(
+        claim.Points,
+        claim.HasErrorEstimate,
+        "the real line",
+        [
+            $"w(x) = exp(−({EvenPolynomial(claim.Coefficients.Count)}))/Z, Z the integral of the exponential itself (NormalizingIntegral).",
+            $"c: {List(claim.Coefficients)}.",
+            "Each of these numbers means the exact value of a binary64 number.",
+        ],
+        "Chihara, An Introduction to Orthogonal Polynomials (1978), I");
 
     private static Explanation Rule(int points, bool hasErrorEstimate, string range, string[] density, string sources) => new(
         [

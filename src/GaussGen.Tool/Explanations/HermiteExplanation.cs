@@ -24,14 +24,15 @@ internal static class HermiteExplanation
                 isDensity ? "The weights are wᵢ = n!/(n Heₙ₋₁(xᵢ))²." : "The weights are wᵢ = 2ⁿ⁻¹ n! √π/(n Hₙ₋₁(xᵢ))².",
                 "For a normal variable X with mean m and standard deviation s:",
                 isDensity ? "E f(X) ≈ Σ wᵢ f(m + s xᵢ)." : "E f(X) ≈ (1/√π) Σ wᵢ f(m + √2 s xᵢ).",
+                .. RuleWords.AntiGaussian(claim.HasErrorEstimate, degree),
             ],
             [
                 $"Exact for every polynomial up to degree {Explanation.Text(degree)}, apart from rounding;",
                 isDensity ? "otherwise off by n!/(2n)! f⁽²ⁿ⁾(ξ) for some ξ." : "otherwise off by n! √π/(2ⁿ (2n)!) f⁽²ⁿ⁾(ξ) for some ξ.",
             ],
             RuleWords.Members,
-            RuleWords.Caution,
-            "NIST DLMF 3.5(v), 18.9; Szegő, Orthogonal Polynomials (1939), 3.4")
+            RuleWords.CautionOf(claim.HasErrorEstimate),
+            "NIST DLMF 3.5(v), 18.9; Szegő, Orthogonal Polynomials (1939), 3.4" + RuleWords.AntiGaussianSource(claim.HasErrorEstimate))
         {
             Plot = PlottedMembers.Rule,
         };

@@ -43,7 +43,8 @@ internal sealed record AdHocTable(string Name, string Attribute, TableRequest Re
             points,
             isPhysicist ? HermiteWeight.ExponentialOfMinusSquare : HermiteWeight.StandardNormalDensity,
             choices.Format,
-            choices.DropZeroWeights),
+            choices.DropZeroWeights,
+            choices.ErrorEstimate),
         choices);
 
     /// <summary>A rule for the half-normal density.</summary>
@@ -53,6 +54,15 @@ internal sealed record AdHocTable(string Name, string Attribute, TableRequest Re
         "GaussHalfRangeHermite",
         new GaussHalfRangeHermiteRequest(points, choices.Format, choices.DropZeroWeights),
         new GaussHalfRangeHermiteClaim(points, choices.Format, choices.DropZeroWeights, choices.ErrorEstimate),
+        choices);
+
+    /// <summary>A rule for the standard normal density on an interval.</summary>
+    public static AdHocTable GaussTruncatedNormal(int points, double lower, double upper, RuleChoices choices) => Rule(
+        "gauss_truncated_normal",
+        points,
+        "GaussTruncatedNormal",
+        new GaussTruncatedNormalRequest(points, lower, upper, choices.Format, choices.DropZeroWeights),
+        new GaussTruncatedNormalClaim(points, lower, upper, choices.Format, choices.DropZeroWeights, choices.ErrorEstimate),
         choices);
 
     /// <summary>A rule for |x|^(2μ) exp(−x²).</summary>
@@ -85,12 +95,73 @@ internal sealed record AdHocTable(string Name, string Attribute, TableRequest Re
             points, weights, means, standardDeviations, choices.Format, choices.DropZeroWeights, choices.ErrorEstimate),
         choices);
 
+    /// <summary>A rule for the density proportional to exp(−(c₁x² + c₂x⁴ + …)).</summary>
+    public static AdHocTable GaussEvenExponential(int points, IReadOnlyList<double> coefficients, RuleChoices choices) => Rule(
+        "gauss_even_exponential",
+        points,
+        "GaussEvenExponential",
+        new GaussEvenExponentialRequest(points, new ValueList(coefficients), choices.Format, choices.DropZeroWeights),
+        new GaussEvenExponentialClaim(points, coefficients, choices.Format, choices.DropZeroWeights, choices.ErrorEstimate),
+        choices);
+
+    /// <summary>A nested rule for the standard normal density.</summary>
+    public static AdHocTable NestedHermite(int level, RuleChoices choices) => Rule(
+        "nested_hermite",
+        level,
+        "NestedHermite",
+        new NestedHermiteRequest(level, choices.Format, choices.DropZeroWeights),
+        new NestedHermiteClaim(level, choices.Format, choices.DropZeroWeights, choices.ErrorEstimate),
+        choices);
+
     /// <summary>Moments of a normal distribution.</summary>
     public static AdHocTable NormalMoments(double mean, double standardDeviation, int maximumOrder, BinaryFormat format) => new(
         "normal_moments",
         "NormalMoments",
         new NormalMomentsRequest(mean, standardDeviation, maximumOrder, format),
         new NormalMomentsClaim(mean, standardDeviation, maximumOrder, format));
+
+    /// <summary>Moments of a normal distribution on an interval.</summary>
+    public static AdHocTable TruncatedNormalMoments(
+        double mean, double standardDeviation, double lower, double upper, int maximumOrder, BinaryFormat format) => new(
+        "truncated_normal_moments",
+        "TruncatedNormalMoments",
+        new TruncatedNormalMomentsRequest(mean, standardDeviation, lower, upper, maximumOrder, format),
+        new TruncatedNormalMomentsClaim(mean, standardDeviation, lower, upper, maximumOrder, format));
+
+    /// <summary>Moments of a half-normal distribution.</summary>
+    public static AdHocTable HalfNormalMoments(double scale, int maximumOrder, BinaryFormat format) => new(
+        "half_normal_moments",
+        "HalfNormalMoments",
+        new HalfNormalMomentsRequest(scale, maximumOrder, format),
+        new HalfNormalMomentsClaim(scale, maximumOrder, format));
+
+    /// <summary>Moments of a log-normal distribution.</summary>
+    public static AdHocTable LogNormalMoments(double logMean, double logStandardDeviation, int maximumOrder, BinaryFormat format) => new(
+        "log_normal_moments",
+        "LogNormalMoments",
+        new LogNormalMomentsRequest(logMean, logStandardDeviation, maximumOrder, format),
+        new LogNormalMomentsClaim(logMean, logStandardDeviation, maximumOrder, format));
+
+    /// <summary>Moments of the density proportional to exp(−(c₁x² + c₂x⁴ + …)).</summary>
+    public static AdHocTable EvenExponentialMoments(IReadOnlyList<double> coefficients, int maximumOrder, BinaryFormat format) => new(
+        "even_exponential_moments",
+        "EvenExponentialMoments",
+        new EvenExponentialMomentsRequest(new ValueList(coefficients), maximumOrder, format),
+        new EvenExponentialMomentsClaim(coefficients, maximumOrder, format));
+
+    /// <summary>The gamma function at half-integers.</summary>
+    public static AdHocTable HalfIntegerGamma(int maximumOrder, BinaryFormat format) => new(
+        "half_integer_gamma",
+        "HalfIntegerGamma",
+        new HalfIntegerGammaRequest(maximumOrder, format),
+        new HalfIntegerGammaClaim(maximumOrder, format));
+
+    /// <summary>Matrix elements of a power of x between states of the harmonic oscillator.</summary>
+    public static AdHocTable OscillatorMatrixElements(int size, int power, BinaryFormat format) => new(
+        "oscillator_matrix_elements",
+        "OscillatorMatrixElements",
+        new OscillatorMatrixElementsRequest(size, power, format),
+        new OscillatorMatrixElementsClaim(size, power, format));
 
     /// <summary>Constructs and proves the table.</summary>
     /// <exception cref="InputException">The table cannot be constructed, or an entry is too large for the number format.</exception>

@@ -82,6 +82,12 @@ public class VerifyTests
     [InlineData("[GaussNormalMixture(3, null, new double[] { 1 }, new double[] { 1 })] class T { }", "argument 2 of [GaussNormalMixture] is null where a list of numbers is expected; give the numbers")]
     [InlineData("[GaussNormalMixture(3, new double[] { 1 }, new double[] { 1, 2 }, new double[] { 1 })] class T { }", "must be as many as each other")]
     [InlineData("[GaussNormalMixture(3, new double[0], new double[0], new double[0])] class T { }", "[GaussNormalMixture] asks for what cannot be")]
+    [InlineData("[GaussEvenExponential(3)] class T { }", "[GaussEvenExponential] asks for what cannot be")]
+    [InlineData("[GaussEvenExponential(3, null)] class T { }", "argument 2 of [GaussEvenExponential] is null where a list of numbers is expected")]
+    [InlineData("[EvenExponentialMoments(1, -1)] class T { }", "[EvenExponentialMoments] asks for what cannot be")]
+    [InlineData("[GaussTruncatedNormal(3, 2, 1)] class T { }", "[GaussTruncatedNormal] asks for what cannot be")]
+    [InlineData("[NestedHermite(5)] class T { }", "[NestedHermite] asks for what cannot be")]
+    [InlineData("[OscillatorMatrixElements(0, 1)] class T { }", "[OscillatorMatrixElements] asks for what cannot be")]
     [InlineData("class T { [System.CodeDom.Compiler.GeneratedCode(\"GaussGen\", \"0.1.0\")] static ReadOnlySpan<double> Nodes => new double[] { 1 }; }", "attribute that says which one is gone")]
     public async Task What_cannot_be_proven_is_counted_and_said(string type, string reason)
     {

@@ -63,6 +63,45 @@ public sealed class CHeaderTests : IDisposable
     }
 
     [CFact]
+    public async Task Every_family_is_C()
+    {
+        byte[] image = FixtureCompiler.Generate(Sources.Families);
+        Run run = await CommandLine.RunAsync("export", _folder.Add("Boat.dll", image), "--output", _folder.Below("tables.h"), "--prefix", "boat_");
+        Assert.Equal((0, ""), (run.ExitCode, run.Messages));
+        string header = await File.ReadAllTextAsync(_folder.Below("tables.h"));
+        Assert.All(header.Split('\n'), line => Assert.InRange(line.Length, 0, 100));
+        Assert.DoesNotMatch("(^|[ (])_", header);
+
+        (string Type, string Array, string Member, string CType)[] lists =
+        [
+            ("SurveyBoat.Noise", "boat_noise_nodes", "Nodes", "double"),
+            ("SurveyBoat.Noise32", "boat_noise32_companion_nodes", "CompanionNodes", "float"),
+            ("SurveyBoat.Clipped", "boat_clipped_companion_weights", "CompanionWeights", "double"),
+            ("SurveyBoat.Finer", "boat_finer_companion_weights", "CompanionWeights", "float"),
+            ("SurveyBoat.ClippedMoments", "boat_clipped_moments_central", "Central", "double"),
+            ("SurveyBoat.Gammas", "boat_gammas_gamma", "Gamma", "double"),
+            ("SurveyBoat.Gammas32", "boat_gammas32_reciprocal", "Reciprocal", "float"),
+            ("SurveyBoat.Oscillator", "boat_oscillator_elements", "Elements", "double"),
+        ];
+        string[] lines = await CompileAndRunAsync("tables.h", lists.Select(list => (list.Array, list.CType)));
+        using RunningTables running = new(image);
+        Assert.Equal(lists.SelectMany(list => running.Bits(list.Type, list.Member).Select(bits => $"{list.Array} {bits:x16}")), lines);
+
+        string main = Write("constants.c", """
+            #include "tables.h"
+            int main(void)
+            {
+                int bad = boat_well32_normalizing_integral != 0x1.40d932p+1f || boat_well32_error_factor != 0.5f;
+                bad |= sizeof boat_oscillator_elements != 9 * sizeof(double) || boat_finer_point_count != 9;
+                return bad;
+            }
+            """);
+        (int code, string text) = await CCompiler.CompileAsync(_folder.Below("constants"), main);
+        Assert.True(code == 0, text);
+        Assert.Equal(0, (await CCompiler.RunAsync(_folder.Below("constants"), [])).ExitCode);
+    }
+
+    [CFact]
     public async Task Each_header_stands_alone_and_beside_the_others()
     {
         string path = _folder.Add("Boat.dll", FixtureCompiler.Generate(Sources.Small));

@@ -97,12 +97,59 @@ public sealed class ExportTests : IDisposable
         (string Type, string[] Options)[] twins =
         [
             ("Noise", ["--rule", "gauss-half-range-hermite", "--points", "3"]),
+            ("Noise32", ["--rule", "gauss-half-range-hermite", "--points", "2", "--error-estimate", "--format", "binary32"]),
+            ("Clipped", ["--rule", "gauss-truncated-normal", "--points", "2", "--lower", "-1", "--upper", "2", "--error-estimate"]),
+            ("Tail", ["--rule", "gauss-truncated-normal", "--points", "3", "--lower", "8", "--format", "binary32"]),
+            ("Tail", ["--rule", "gauss-truncated-normal", "--points", "3", "--lower", "8", "--upper", "infinity", "--format", "binary32"]),
             ("Rough", ["--rule", "gauss-generalized-hermite", "--points", "3", "--exponent", "0.25"]),
+            ("Rough32", ["--rule", "gauss-generalized-hermite", "--points", "2", "--exponent", "-.25", "--error-estimate", "--format", "binary32"]),
+            ("Fading", ["--rule", "gauss-log-normal", "--points", "2", "--log-mean", "0.1", "--log-standard-deviation", "0.4", "--error-estimate"]),
             ("TwoModes", ["--rule", "gauss-normal-mixture", "--points", "3", "--weights", "0.3,0.9", "--means", "-1,0.5", "--standard-deviations", "0.5,1.25"]),
             ("TwoModes", ["--rule", "gauss-normal-mixture", "--points", "3", "--weights=0.3, 0.9", "--means=-1.0, +5e-1", "--standard-deviations", "0.5, 1.25"]),
+            ("OneMode", ["--rule", "gauss-normal-mixture", "--points", "1", "--weights", "1", "--means", "2", "--standard-deviations", "3", "--error-estimate", "--format", "binary32"]),
+            ("Well", ["--rule", "gauss-even-exponential", "--points", "3", "--coefficients", "-1,0.25"]),
+            ("Well32", ["--rule", "gauss-even-exponential", "--points", "2", "--coefficients", "0.5", "--error-estimate", "--format", "binary32"]),
+            ("Coarse", ["--rule", "nested-hermite", "--level", "1"]),
+            ("Coarsest", ["--rule", "nested-hermite", "--level", "0", "--error-estimate"]),
+            ("Finer", ["--rule", "nested-hermite", "--level", "2", "--error-estimate", "--format", "binary32"]),
+            ("Estimated", ["--rule", "gauss-hermite", "--points", "2", "--error-estimate"]),
+            ("Estimated32", ["--rule", "gauss-hermite", "--points", "3", "--convention", "physicist", "--error-estimate", "--format", "binary32"]),
+            ("ClippedMoments", ["--moments", "truncated-normal", "--mean", "0.5", "--standard-deviation", "1", "--lower", "-1", "--upper", "2", "--maximum-order", "3"]),
+            ("NoiseMoments", ["--moments", "half-normal", "--scale", "1.5", "--maximum-order", "3", "--format", "binary32"]),
+            ("FadingMoments", ["--moments", "log-normal", "--log-mean", "0.1", "--log-standard-deviation", "0.4", "--maximum-order", "2"]),
+            ("WellMoments", ["--moments", "even-exponential", "--coefficients", "1,0.5", "--maximum-order", "2"]),
+            ("Gammas", ["--sequence", "half-integer-gamma", "--maximum-order", "3"]),
+            ("Gammas32", ["--sequence", "half-integer-gamma", "--maximum-order", "2", "--format", "binary32"]),
+            ("Oscillator", ["--sequence", "oscillator-matrix-elements", "--size", "3", "--power", "2"]),
+            ("Oscillator32", ["--sequence", "oscillator-matrix-elements", "--size", "2", "--power", "3", "--format", "binary32"]),
         ];
         Assert.Empty(Sources.TypesOf(Sources.Families).Except(twins.Select(twin => twin.Type)));
         await AssertTwinsAsync(_folder.Add("Families.dll", FixtureCompiler.Generate(Sources.Families)), twins);
+    }
+
+    [Fact]
+    public async Task Every_family_has_every_bit()
+    {
+        byte[] image = FixtureCompiler.Generate(Sources.Families);
+        Run run = await CommandLine.RunAsync("export", _folder.Add("Families.dll", image), "--as", "csv");
+        Assert.Equal((0, ""), (run.ExitCode, run.Messages));
+        string[][] records = [.. run.Results.TrimEnd('\n').Split('\n')[1..].Select(line => line.Split(','))];
+        Assert.Equal(Sources.TypesOf(Sources.Families).Order(StringComparer.Ordinal), records.Select(record => record[0]["SurveyBoat.".Length..]).Distinct());
+        using RunningTables running = new(image);
+        foreach (IGrouping<(string Type, string Member), string[]> span in records.Where(record => record[2].Length > 0).GroupBy(record => (record[0], record[1])))
+        {
+            Assert.Equal(running.Bits(span.Key.Type, span.Key.Member), span.Select(entry => Convert.ToUInt64(entry[5], 16)));
+        }
+
+        foreach (string member in new[] { "CompanionNodes", "CompanionWeights", "ErrorFactor", "NormalizingIntegral", "Gamma", "Reciprocal", "Elements", "Absolute" })
+        {
+            Assert.Contains(records, record => record[1] == member);
+        }
+
+        // The integral of exp(−x²/2) over the line is √(2π) = 2.5066282746… (DLMF 7.2).
+        Assert.Contains("SurveyBoat.Well32,NormalizingIntegral,,binary32,2.5066283,0x40206C99,proven", run.Results, StringComparison.Ordinal);
+        Assert.Contains("SurveyBoat.Well32,ErrorFactor,,binary32,0.5,0x3F000000,proven", run.Results, StringComparison.Ordinal);
+        Assert.DoesNotContain(records, record => record[1] is "Raw0" or "IntegralScale" or "ExpectationLocation" or "ExpectationScale");
     }
 
     private static async Task AssertTwinsAsync(string assembly, (string Type, string[] Options)[] twins)

@@ -36,8 +36,29 @@ internal static class Sources
         namespace SurveyBoat
         {
             [GaussHalfRangeHermite(3)] public static partial class Noise { }
+            [GaussHalfRangeHermite(2, ErrorEstimate = true, Format = NumberFormat.Binary32)] public static partial class Noise32 { }
+            [GaussTruncatedNormal(2, -1, 2, ErrorEstimate = true)] public static partial class Clipped { }
+            [GaussTruncatedNormal(3, 8, double.PositiveInfinity, Format = NumberFormat.Binary32)] public static partial class Tail { }
             [GaussGeneralizedHermite(3, 0.25)] public static partial class Rough { }
+            [GaussGeneralizedHermite(2, -0.25, ErrorEstimate = true, Format = NumberFormat.Binary32)] public static partial class Rough32 { }
+            [GaussLogNormal(2, 0.1, 0.4, ErrorEstimate = true)] public static partial class Fading { }
             [GaussNormalMixture(3, new[] { 0.3, 0.9 }, new[] { -1, 0.5 }, new[] { 0.5, 1.25 })] public static partial class TwoModes { }
+            [GaussNormalMixture(1, new double[] { 1 }, new double[] { 2 }, new double[] { 3 }, ErrorEstimate = true, Format = NumberFormat.Binary32)] public static partial class OneMode { }
+            [GaussEvenExponential(3, -1, 0.25)] public static partial class Well { }
+            [GaussEvenExponential(2, 0.5, ErrorEstimate = true, Format = NumberFormat.Binary32)] public static partial class Well32 { }
+            [NestedHermite(1)] public static partial class Coarse { }
+            [NestedHermite(0, ErrorEstimate = true)] public static partial class Coarsest { }
+            [NestedHermite(2, ErrorEstimate = true, Format = NumberFormat.Binary32)] public static partial class Finer { }
+            [GaussHermite(2, ErrorEstimate = true)] public static partial class Estimated { }
+            [GaussHermite(3, Convention = HermiteConvention.Physicist, ErrorEstimate = true, Format = NumberFormat.Binary32)] public static partial class Estimated32 { }
+            [TruncatedNormalMoments(0.5, 1, -1, 2, MaximumOrder = 3)] public static partial class ClippedMoments { }
+            [HalfNormalMoments(1.5, MaximumOrder = 3, Format = NumberFormat.Binary32)] public static partial class NoiseMoments { }
+            [LogNormalMoments(0.1, 0.4, MaximumOrder = 2)] public static partial class FadingMoments { }
+            [EvenExponentialMoments(1, 0.5, MaximumOrder = 2)] public static partial class WellMoments { }
+            [HalfIntegerGamma(3)] public static partial class Gammas { }
+            [HalfIntegerGamma(2, Format = NumberFormat.Binary32)] public static partial class Gammas32 { }
+            [OscillatorMatrixElements(3, 2)] public static partial class Oscillator { }
+            [OscillatorMatrixElements(2, 3, Format = NumberFormat.Binary32)] public static partial class Oscillator32 { }
         }
         """;
 

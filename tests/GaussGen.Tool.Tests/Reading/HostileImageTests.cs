@@ -4,6 +4,7 @@ using System.Linq;
 using System.Reflection.PortableExecutable;
 using System.Threading;
 using System.Threading.Tasks;
+using GaussGen.Tool.Claims;
 using GaussGen.Tool.Reading;
 using GaussGen.Tool.Tests.Fixtures;
 using Microsoft.CodeAnalysis;
@@ -178,6 +179,24 @@ public class HostileImageTests
         Assert.InRange(GC.GetAllocatedBytesForCurrentThread() - before, 0, 16L << 20);
         Assert.Empty(type.Declarations);
         Assert.Contains("the arguments of the attribute cannot be read", type.UnreadDeclarations["GaussEvenExponential"], StringComparison.Ordinal);
+    }
+
+    [Fact]
+    public void A_list_that_is_null_or_of_another_type_is_said()
+    {
+        byte[] none = FixtureCompiler.Compile("[GaussGen.GaussEvenExponential(5, null)] class T { }");
+        Declaration declaration = Assert.Single(Assert.Single(Read(none).Types).Declarations);
+        Assert.Null(declaration.Arguments[1]);
+        ClaimException error = Assert.Throws<ClaimException>(() => ClaimTable.Read(ClaimTable.Find("GaussEvenExponential")!, declaration));
+        Assert.StartsWith("argument 2 of [GaussEvenExponential] is null", error.Message, StringComparison.Ordinal);
+
+        byte[] texts = FixtureCompiler.CompileAgainst(
+            "namespace GaussGen { public class GaussEvenExponentialAttribute : System.Attribute { public GaussEvenExponentialAttribute(int points, params string[] texts) { } } }",
+            "GaussGen",
+            "[GaussGen.GaussEvenExponential(5, \"0.5\")] class T { }");
+        declaration = Assert.Single(Assert.Single(Read(texts).Types).Declarations);
+        error = Assert.Throws<ClaimException>(() => ClaimTable.Read(ClaimTable.Find("GaussEvenExponential")!, declaration));
+        Assert.StartsWith("argument 2 of [GaussEvenExponential] is not a list of binary64 numbers", error.Message, StringComparison.Ordinal);
     }
 
     [Fact]

@@ -30,12 +30,32 @@ public class TamperingTests
         { "[NormalMoments(1.5, 0.25)]", "[NormalMoments(1.5, 0.25, MaximumOrder = 5)]" },
         { "[NormalMoments(1.5, 0.25)]", "[NormalMoments(1.5, 0.25, MaximumOrder = 3)]" },
         { "[NormalMoments(1.5, 0.25)]", "[GaussHermite(5)]" },
+        { "[GaussHermite(5)]", "[GaussHermite(5, ErrorEstimate = true)]" },
+        { "[GaussHalfRangeHermite(4)]", "[GaussHalfRangeHermite(4, ErrorEstimate = true)]" },
+        { "[GaussTruncatedNormal(4, -1, 2)]", "[GaussTruncatedNormal(4, -1, 2.00000001)]" },
+        { "[GaussTruncatedNormal(4, -1, 2)]", "[GaussTruncatedNormal(4, -2, 2)]" },
         { "[GaussGeneralizedHermite(4, 0.25)]", "[GaussGeneralizedHermite(4, 0.25000000001)]" },
         { "[GaussGeneralizedHermite(4, 0)]", "[GaussHermite(4, Convention = HermiteConvention.Physicist)]" },
         { "[GaussLogNormal(4, 0.1, 0.4)]", "[GaussLogNormal(4, 0.1, 0.4000000000000001)]" },
         { "[GaussLogNormal(4, 0.1, 0.4)]", "[GaussLogNormal(4, 0.4, 0.1)]" },
         { "[GaussNormalMixture(4, new[] { 0.5, 0.5 }, new double[] { -1, 1 }, new double[] { 1, 2 })]", "[GaussNormalMixture(4, new[] { 0.5, 0.5 }, new double[] { -1, 1 }, new double[] { 2, 1 })]" },
         { "[GaussNormalMixture(4, new[] { 0.5, 0.5 }, new double[] { -1, 1 }, new double[] { 1, 2 })]", "[GaussNormalMixture(4, new[] { 0.5, 0.25 }, new double[] { -1, 1 }, new double[] { 1, 2 })]" },
+        { "[GaussEvenExponential(4, -1, 0.25)]", "[GaussEvenExponential(4, 1, 0.25)]" },
+        { "[GaussEvenExponential(4, -1, 0.25)]", "[GaussEvenExponential(4, -1, 0.25, 0.0001)]" },
+        { "[NestedHermite(2)]", "[NestedHermite(3)]" },
+        { "[NestedHermite(1)]", "[NestedHermite(1, ErrorEstimate = true)]" },
+        { "[NestedHermite(2)]", "[GaussHermite(9)]" },
+        { "[TruncatedNormalMoments(0, 1, -1, 2)]", "[TruncatedNormalMoments(0, 1, -1, 2.00000001)]" },
+        { "[TruncatedNormalMoments(0, 1, -1, 2)]", "[NormalMoments(0, 1)]" },
+        { "[HalfNormalMoments(1.5)]", "[HalfNormalMoments(1.5000000000000002)]" },
+        { "[LogNormalMoments(0.1, 0.4)]", "[LogNormalMoments(0.1, 0.4000000000000001)]" },
+        { "[EvenExponentialMoments(1, 0.5)]", "[EvenExponentialMoments(0.5, 1)]" },
+        { "[EvenExponentialMoments(1, 0.5)]", "[EvenExponentialMoments(1, 0.5, MaximumOrder = 5)]" },
+        { "[HalfIntegerGamma(3)]", "[HalfIntegerGamma(4)]" },
+        { "[HalfIntegerGamma(3)]", "[HalfIntegerGamma(2)]" },
+        { "[OscillatorMatrixElements(3, 2)]", "[OscillatorMatrixElements(3, 4)]" },
+        { "[OscillatorMatrixElements(4, 2)]", "[OscillatorMatrixElements(2, 2)]" },
+        { "[OscillatorMatrixElements(3, 2)]", "[HalfIntegerGamma(8)]" },
     };
 
     /// <summary>Together with the constants these are more than twenty thousand flips.</summary>
@@ -49,6 +69,41 @@ public class TamperingTests
         (int Offset, int Bit)[] flips = [.. places.Data.Concat(places.Constants).Concat(places.CodeConstants).SelectMany(Bits)];
         Assert.InRange(flips.Length, 10_000, 30_000);
         AssertCaught(image, flips);
+    }
+
+    /// <summary>Every member of every family is among them: spans, companions, constants, and the numbers in the code of sums.</summary>
+    [Fact]
+    public void Sampled_bits_of_every_family()
+    {
+        byte[] image = FixtureCompiler.Generate(Sources.Families);
+        ImagePlaces places = new(image);
+        (int Offset, int Bit)[] flips = [.. places.Data.Concat(places.Constants).Concat(places.CodeConstants).SelectMany(Bits)];
+        Assert.InRange(flips.Length, 8_000, 30_000);
+        new Random(2).Shuffle(flips);
+        AssertCaught(image, flips[..SampledFlips]);
+    }
+
+    /// <summary>One bit of every list, constant and number in code.</summary>
+    [Fact]
+    public void Every_member_that_a_family_has_is_named_where_it_is_changed()
+    {
+        byte[] image = FixtureCompiler.Generate(Sources.Families);
+        ImagePlaces places = new(image);
+        HashSet<string> named = [];
+        foreach (Place place in places.Data.Concat(places.Constants).Concat(places.CodeConstants))
+        {
+            byte[] changed = [.. image];
+            changed[place.Offset] ^= 4;
+            named.UnionWith(Verify(Touched(image, changed)!).SelectMany(result => result.Findings).Select(finding => finding.Member).OfType<string>());
+        }
+
+        string[] expected =
+        [
+            "Nodes[0]", "Weights[0]", "CompanionNodes[0]", "CompanionWeights[0]", "PointCount", "DegreeOfExactness", "NormalizingIntegral",
+            "NodeScale", "ReciprocalTotalWeight", "IntegralLocation", "IntegralScale", "ExpectationLocation", "ExpectationScale", "ErrorFactor",
+            "Raw[0]", "Central[0]", "Absolute[0]", "Raw3", "Central2", "Absolute1", "Gamma[0]", "Reciprocal[0]", "Elements[0]",
+        ];
+        Assert.Empty(expected.Except(named));
     }
 
     [Fact]

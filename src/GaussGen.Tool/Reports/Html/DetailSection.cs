@@ -2,6 +2,7 @@ using System.Collections.Generic;
 using System.Globalization;
 using System.Linq;
 using GaussGen.Mathematics.Proofs;
+using GaussGen.Tool.Claims;
 using GaussGen.Tool.Verification;
 
 namespace GaussGen.Tool.Reports.Html;
@@ -71,6 +72,11 @@ internal static class DetailSection
             yield return (integer.Name, ((int)integer.Found).ToString(CultureInfo.InvariantCulture));
         }
 
+        foreach (EntryProof constant in proof.Entries.Where(entry => entry is { IsInteger: false, Index: null } && ClaimTable.Find(table.Attribute)!.Constants.Contains(entry.Member)))
+        {
+            yield return (constant.Name, EncodingText.Of(constant.Found, proof.Claim.Format));
+        }
+
         if (proof.MomentEquations.Count > 0)
         {
             yield return ("Moment equations", Equations(proof.MomentEquations));
@@ -82,7 +88,7 @@ internal static class DetailSection
         MomentEquation tightest = equations.MaxBy(equation => equation.Allowance > 0 ? equation.Residual / equation.Allowance : 0)!;
         string which = equations.Count == 1
             ? $"the equation of degree {equations[0].Degree} {(equations[0].Holds ? "holds" : "does not hold")}"
-            : $"those of degrees {string.Join(", ", equations.Select(equation => equation.Degree))} {(equations.All(equation => equation.Holds) ? "hold" : "do not all hold")}";
+            : $"those of degrees {string.Join(", ", equations.Select(equation => equation.Degree).Distinct())} {(equations.All(equation => equation.Holds) ? "hold" : "do not all hold")}";
         return $"{which} for the entries; the relative residual of degree {tightest.Degree}, the one nearest to its limit, is at most "
             + $"{PlotNumbers.Label(tightest.Residual)}, and {PlotNumbers.Label(tightest.Allowance)} is allowed";
     }

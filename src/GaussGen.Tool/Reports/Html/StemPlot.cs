@@ -87,6 +87,8 @@ internal sealed class StemPlot
     {
         string scale = _isLogarithmic ? "on a logarithmic scale" : "on a linear scale";
         string zeros = ZeroCount == 0 ? "" : $" {Counted.Of(ZeroCount, "weight is", "weights are")} zero{(_isLogarithmic ? " and marked on the axis" : "")}.";
+        int below = _pairs.Count(pair => pair.Weight < 0);
+        zeros += below == 0 ? "" : $" {Counted.Of(below, "weight is", "weights are")} below zero.";
         return $"{Counted.Of(_pairs.Count, "node", "nodes")} from {Label(_pairs.Min(pair => pair.Node))} to {Label(_pairs.Max(pair => pair.Node))}; "
             + (Largest > 0 ? $"weights above zero from {Label(SmallestAboveZero)} to {Label(Largest)}, {scale}.{zeros}" : "no weight is above zero.");
     }
