@@ -9,7 +9,7 @@ namespace GaussGen;
 /// </summary>
 /// <remarks>
 /// <para>Levels 0 to 4 have 1, 3, 9, 19 and 35 points and degrees of exactness 1, 5, 15, 29 and 51. The weight function is the
-/// standard normal density; the weights sum to 1, and some are negative. The generated part has <c>PointCount</c>,
+/// standard normal density; the weights sum to 1, and two of level 3 are negative. The generated part has <c>PointCount</c>,
 /// <c>DegreeOfExactness</c>, <c>Nodes</c> (ascending), <c>Weights</c> and two forms of
 /// <c>Expectation(mean, standardDeviation, f)</c>. Every node and weight is the representable value nearest to the true one, ties
 /// to even.</para>

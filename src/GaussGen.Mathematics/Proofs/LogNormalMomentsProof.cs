@@ -40,7 +40,7 @@ internal sealed class LogNormalMomentsProof(LogNormalMomentsClaim claim)
                 lists.RawTooLarge(k);
             }
 
-            if (k > 1 && AboutMeanExponent(k) > TooLarge)
+            if (AboutMeanExponent(k) > TooLarge)
             {
                 lists.AboutMeanTooLarge(k);
             }
@@ -62,7 +62,7 @@ internal sealed class LogNormalMomentsProof(LogNormalMomentsClaim claim)
             raw[k] = lists.IsRawKnown(k) ? default : Exponential(RawExponent(k), precision, cancellation);
             if (k == 1)
             {
-                Ball mean = RawExponent(1) > TooLarge ? Ball.WholeLine : Exponential(RawExponent(1), precision, cancellation);
+                Ball mean = lists.IsAbsoluteKnown(1) ? default : Exponential(RawExponent(1), precision, cancellation);
                 absolute[1] = Ball.Multiply(mean, distances.First(cancellation), precision + 8);
             }
             else if (!lists.IsCentralKnown(k))

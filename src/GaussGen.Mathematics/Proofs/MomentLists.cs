@@ -42,9 +42,12 @@ internal sealed class MomentLists
     /// <summary>Marks a raw moment as beyond every format.</summary>
     public void RawTooLarge(int order) => _known[order] = KnownNumbers.TooLarge(_format);
 
-    /// <summary>Marks the central and the absolute moment as beyond every format.</summary>
-    public void AboutMeanTooLarge(int order) =>
-        _known[_count + order] = _known[(2 * _count) + order] = KnownNumbers.TooLarge(_format);
+    /// <summary>Marks the absolute moment, and the central one unless it is known, as beyond every format.</summary>
+    public void AboutMeanTooLarge(int order)
+    {
+        _known[_count + order] ??= KnownNumbers.TooLarge(_format);
+        _known[(2 * _count) + order] = KnownNumbers.TooLarge(_format);
+    }
 
     /// <summary>Whether the raw moment is known already.</summary>
     public bool IsRawKnown(int order) => _known[order] is not null;

@@ -109,6 +109,7 @@ public class FamilyMomentsProofTests
             (new HalfNormalMomentsClaim(double.Epsilon, 20, format), 20),
             (new LogNormalMomentsClaim(0, 1e-300, 20, format), 20),
             (new LogNormalMomentsClaim(-1e6, 1400, 2, format), 2),
+            (new LogNormalMomentsClaim(1e308, 1e150, 3, format), 3),
             (new EvenExponentialMomentsClaim([-100, 1], 20, format), 20),
             (new EvenExponentialMomentsClaim([1e300, 1e-300], 4, format), 4),
         ];
