@@ -37,8 +37,11 @@ if (file.Soundings.Count == 0)
 Simulation simulation = new(draws: 1_000_000, seed: 1);
 Report report = new();
 report.Table("Mean echo, relative to one metre", file.Soundings.Select(sounding => Echo.At(sounding, simulation)));
+report.Table("Mean echo of the readings that the gate lets pass", file.Soundings.Select(sounding => GatedEcho.At(sounding, simulation)));
 report.Table("Probability that a wave slaps the bow", file.Soundings.Select(sounding => WaveSlap.At(sounding, simulation)));
 report.Table("Drift with the current", Drift.Compare(simulation));
+report.Table("Across the tide", Crabbing.Compare(simulation));
+Report.Line($"  the rule's own estimate of its error in the crab angle: {Crabbing.EstimatedError():G2} degrees");
 report.Summary();
 return report.ExitCode;
 

@@ -27,6 +27,8 @@ internal sealed class Report
         }
     }
 
+    public static void Line(string text) => Console.WriteLine(text);
+
     public void Summary()
     {
         int disagreements = _all.Count(comparison => !comparison.Agrees);

@@ -21,3 +21,33 @@ internal static partial class DriftSpeed
     public const double Mean = 0.6;
     public const double StandardDeviation = 0.15;
 }
+
+/// <summary>
+/// What is left of a normal reading in units of its deviation once the gate has shut: from 1 below the mean to 2.5 above it. Half a
+/// gate is half a bell: a rule for the whole line would need hundreds of nodes to find its edges, this one has them in its weight function.
+/// </summary>
+[GaussTruncatedNormal(12, GateBelow, GateAbove)]
+internal static partial class Gate
+{
+    public const double GateBelow = -1.0;
+    public const double GateAbove = 2.5;
+}
+
+/// <summary>
+/// The current across the survey line, in metres a second: slack water for three tenths of the time, a running tide otherwise. One normal
+/// distribution has no two humps; with the mixture as the weight function, one table serves both states at once.
+/// </summary>
+[GaussNormalMixture(
+    10,
+    new[] { 0.3, 0.7 },
+    new[] { SlackSpeed, TideSpeed },
+    new[] { SlackDeviation, TideDeviation },
+    ErrorEstimate = true)]
+internal static partial class Tide
+{
+    public const double SlackShare = 0.3;
+    public const double SlackSpeed = 0.1;
+    public const double SlackDeviation = 0.05;
+    public const double TideSpeed = 0.8;
+    public const double TideDeviation = 0.15;
+}

@@ -13,14 +13,18 @@ internal sealed class Simulation(int draws, int seed)
     /// <summary>How many draws make a mean.</summary>
     public int Draws => draws;
 
-    /// <summary>The mean of a function of a normal variable, with its standard error (running variance: Welford 1962).</summary>
-    public SimulatedMean Mean(double mean, double standardDeviation, Func<double, double> function)
+    /// <summary>The mean of a function of a normal variable.</summary>
+    public SimulatedMean Mean(double mean, double standardDeviation, Func<double, double> function) =>
+        Mean(() => Normal(mean, standardDeviation), function);
+
+    /// <summary>The mean of a function of what a source draws, with its standard error (running variance: Welford 1962).</summary>
+    public SimulatedMean Mean(Func<double> source, Func<double, double> function)
     {
         double average = 0.0;
         double squares = 0.0;
         for (int count = 1; count <= draws; count++)
         {
-            double value = function(mean + (standardDeviation * StandardNormal()));
+            double value = function(source());
             double difference = value - average;
             average += difference / count;
             squares += difference * (value - average);
@@ -28,6 +32,12 @@ internal sealed class Simulation(int draws, int seed)
 
         return new SimulatedMean(average, Math.Sqrt(squares / (draws - 1.0) / draws));
     }
+
+    /// <summary>A number between 0 and 1, 1 excluded.</summary>
+    public double Uniform() => _random.NextDouble();
+
+    /// <summary>A normal number.</summary>
+    public double Normal(double mean, double standardDeviation) => mean + (standardDeviation * StandardNormal());
 
     /// <summary>A standard normal number (Box and Muller 1958); the logarithm's argument is never zero.</summary>
     private double StandardNormal() =>
