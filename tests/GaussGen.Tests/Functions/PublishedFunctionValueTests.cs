@@ -5,7 +5,7 @@ using Xunit;
 namespace GaussGen.Tests.Functions;
 
 /// <summary>
-/// Printed tables. The values were recalled from memory and recomputed with mpmath (Data/error-functions.py); each is compared to
+/// Printed tables. The values were recalled from memory and recomputed with mpmath at 40 digits; each is compared to
 /// the digits that are given.
 /// </summary>
 public sealed class PublishedFunctionValueTests
