@@ -18,31 +18,31 @@ internal static class DeclarationTable
             read.Format(),
             read.DropZeroWeights())),
         Family.OfRules("GaussHalfRangeHermite", read => new GaussHalfRangeHermiteRequest(
-            read.Points(GaussHalfRangeHermiteRequest.MaximumPoints), read.Format(), read.DropZeroWeights())),
+            read.Points(UniversalRuleRequest.MaximumPoints), read.Format(), read.DropZeroWeights())),
         Family.OfRules("GaussTruncatedNormal", read =>
         {
-            int points = read.Points(GaussTruncatedNormalRequest.MaximumPoints);
+            int points = read.Points(UniversalRuleRequest.MaximumPoints);
             (double lower, double upper) = read.Interval();
             return new GaussTruncatedNormalRequest(points, lower, upper, read.Format(), read.DropZeroWeights());
         }),
         Family.OfRules("GaussGeneralizedHermite", read => new GaussGeneralizedHermiteRequest(
-            read.Points(GaussGeneralizedHermiteRequest.MaximumPoints), read.Exponent(), read.Format(), read.DropZeroWeights())),
+            read.Points(UniversalRuleRequest.MaximumPoints), read.Exponent(), read.Format(), read.DropZeroWeights())),
         Family.OfRules("GaussLogNormal", read => new GaussLogNormalRequest(
-            read.Points(GaussLogNormalRequest.MaximumPoints),
+            read.Points(UniversalRuleRequest.MaximumPoints),
             read.Finite("logMean"),
             read.Positive("logStandardDeviation"),
             read.Format(),
             read.DropZeroWeights())),
         Family.OfRules("GaussNormalMixture", read =>
         {
-            int points = read.Points(GaussNormalMixtureRequest.MaximumPoints);
+            int points = read.Points(UniversalRuleRequest.MaximumPoints);
             (ValueList weights, ValueList means, ValueList deviations) = read.Mixture();
             return new GaussNormalMixtureRequest(points, weights, means, deviations, read.Format(), read.DropZeroWeights());
         }),
         Family.OfRules(
             "GaussEvenExponential",
             read => new GaussEvenExponentialRequest(
-                read.Points(GaussEvenExponentialRequest.MaximumPoints), read.Coefficients(), read.Format(), read.DropZeroWeights()),
+                read.Points(UniversalRuleRequest.MaximumPoints), read.Coefficients(), read.Format(), read.DropZeroWeights()),
             constants: "NormalizingIntegral"),
         Family.OfRules(
             "NestedHermite",

@@ -16,32 +16,22 @@ namespace GaussGen.Mathematics.Rules;
 /// A request for a Gauss rule for the density proportional to exp(−(c₁x² + c₂x⁴ + c₃x⁶ + …)). Each coefficient is the exact value of a
 /// binary64 number; the last one is above zero.
 /// </summary>
-public sealed record GaussEvenExponentialRequest : RuleRequest
+public sealed record GaussEvenExponentialRequest : UniversalRuleRequest
 {
-    /// <summary>The smallest number of nodes.</summary>
-    public const int MinimumPoints = 1;
-
-    /// <summary>The largest number of nodes.</summary>
-    public const int MaximumPoints = 64;
-
     /// <summary>The largest number of coefficients: up to x¹⁶.</summary>
     public const int MaximumCoefficients = 8;
 
     /// <summary>A request with the given parameters.</summary>
-    /// <param name="points">The number of nodes, from <see cref="MinimumPoints"/> to <see cref="MaximumPoints"/>.</param>
+    /// <param name="points">The number of nodes, from <see cref="UniversalRuleRequest.MinimumPoints"/> to <see cref="UniversalRuleRequest.MaximumPoints"/>.</param>
     /// <param name="coefficients">c₁, c₂, …; finite, the last one above zero.</param>
     /// <param name="format">The number format of every entry.</param>
     /// <param name="dropZeroWeights">Whether nodes whose weight rounds to zero are left out.</param>
     /// <exception cref="ArgumentOutOfRangeException">A parameter is out of range; the message says what to give.</exception>
     public GaussEvenExponentialRequest(int points, ValueList coefficients, BinaryFormat format, bool dropZeroWeights)
-        : base(format, dropZeroWeights)
+        : base(points, format, dropZeroWeights)
     {
-        Points = Parameters.RequireCount(points, MinimumPoints, MaximumPoints, "The number of points", nameof(points));
         Coefficients = EvenExponentialParameters.Require(coefficients, nameof(coefficients));
     }
-
-    /// <summary>The number of nodes.</summary>
-    public int Points { get; }
 
     /// <summary>c₁, c₂, ….</summary>
     public ValueList Coefficients { get; }

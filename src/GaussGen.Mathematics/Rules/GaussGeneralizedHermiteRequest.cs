@@ -12,14 +12,8 @@ namespace GaussGen.Mathematics.Rules;
 /// <summary>
 /// A request for a Gauss rule for the density proportional to |x|^(2μ) exp(−x²). The exponent μ is the exact value of a binary64 number.
 /// </summary>
-public sealed record GaussGeneralizedHermiteRequest : RuleRequest
+public sealed record GaussGeneralizedHermiteRequest : UniversalRuleRequest
 {
-    /// <summary>The smallest number of nodes.</summary>
-    public const int MinimumPoints = 1;
-
-    /// <summary>The largest number of nodes.</summary>
-    public const int MaximumPoints = 64;
-
     /// <summary>The exponent must be above this number: at −½ the weight cannot be integrated.</summary>
     public const double InfimumExponent = -0.5;
 
@@ -27,15 +21,14 @@ public sealed record GaussGeneralizedHermiteRequest : RuleRequest
     public const double MaximumExponent = 1e6;
 
     /// <summary>A request with the given parameters.</summary>
-    /// <param name="points">The number of nodes, from <see cref="MinimumPoints"/> to <see cref="MaximumPoints"/>.</param>
+    /// <param name="points">The number of nodes, from <see cref="UniversalRuleRequest.MinimumPoints"/> to <see cref="UniversalRuleRequest.MaximumPoints"/>.</param>
     /// <param name="exponent">μ, above <see cref="InfimumExponent"/> and at most <see cref="MaximumExponent"/>.</param>
     /// <param name="format">The number format of every entry.</param>
     /// <param name="dropZeroWeights">Whether nodes whose weight rounds to zero are left out.</param>
     /// <exception cref="ArgumentOutOfRangeException">A parameter is out of range; the message says what to give.</exception>
     public GaussGeneralizedHermiteRequest(int points, double exponent, BinaryFormat format, bool dropZeroWeights)
-        : base(format, dropZeroWeights)
+        : base(points, format, dropZeroWeights)
     {
-        Points = Parameters.RequireCount(points, MinimumPoints, MaximumPoints, "The number of points", nameof(points));
         if (!IsExponent(exponent))
         {
             throw new ArgumentOutOfRangeException(nameof(exponent), exponent, string.Format(
@@ -45,9 +38,6 @@ public sealed record GaussGeneralizedHermiteRequest : RuleRequest
         // A request is a key: −0 and 0 are one exponent.
         Exponent = exponent == 0 ? 0.0 : exponent;
     }
-
-    /// <summary>The number of nodes.</summary>
-    public int Points { get; }
 
     /// <summary>μ.</summary>
     public double Exponent { get; }

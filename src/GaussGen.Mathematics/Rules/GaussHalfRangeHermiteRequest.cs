@@ -2,32 +2,23 @@ using System.Threading;
 using GaussGen.Mathematics.Arithmetic;
 using GaussGen.Mathematics.Baselines;
 using GaussGen.Mathematics.Formats;
-using GaussGen.Mathematics.Requests;
 using GaussGen.Mathematics.Rules.Universal;
 using GaussGen.Mathematics.Weights;
 
 namespace GaussGen.Mathematics.Rules;
 
 /// <summary>A request for a Gauss rule for the half-normal density √(2/π) exp(−x²/2) on [0, ∞).</summary>
-public sealed record GaussHalfRangeHermiteRequest : RuleRequest
+public sealed record GaussHalfRangeHermiteRequest : UniversalRuleRequest
 {
-    /// <summary>The smallest number of nodes.</summary>
-    public const int MinimumPoints = 1;
-
-    /// <summary>The largest number of nodes.</summary>
-    public const int MaximumPoints = 64;
-
     /// <summary>A request with the given parameters.</summary>
-    /// <param name="points">The number of nodes, from <see cref="MinimumPoints"/> to <see cref="MaximumPoints"/>.</param>
+    /// <param name="points">The number of nodes, from <see cref="UniversalRuleRequest.MinimumPoints"/> to <see cref="UniversalRuleRequest.MaximumPoints"/>.</param>
     /// <param name="format">The number format of every entry.</param>
     /// <param name="dropZeroWeights">Whether nodes whose weight rounds to zero are left out.</param>
     /// <exception cref="System.ArgumentOutOfRangeException">The number of nodes is out of range.</exception>
     public GaussHalfRangeHermiteRequest(int points, BinaryFormat format, bool dropZeroWeights)
-        : base(format, dropZeroWeights) =>
-        Points = Parameters.RequireCount(points, MinimumPoints, MaximumPoints, "The number of points", nameof(points));
-
-    /// <summary>The number of nodes.</summary>
-    public int Points { get; }
+        : base(points, format, dropZeroWeights)
+    {
+    }
 
     /// <inheritdoc/>
     public override string Claim => ClaimTitle.GaussHalfRangeHermite(Points, DropZeroWeights, ErrorEstimate);

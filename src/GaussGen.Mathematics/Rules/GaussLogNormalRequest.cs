@@ -11,26 +11,20 @@ namespace GaussGen.Mathematics.Rules;
 
 /// <summary>
 /// A request for a Gauss rule for the log-normal density: of exp(Y) for normal Y. Both parameters are the exact values of binary64 numbers.
+/// Weights fall below 2^−1022 before the largest number of nodes, unless the standard deviation is small.
 /// </summary>
-public sealed record GaussLogNormalRequest : RuleRequest
+public sealed record GaussLogNormalRequest : UniversalRuleRequest
 {
-    /// <summary>The smallest number of nodes.</summary>
-    public const int MinimumPoints = 1;
-
-    /// <summary>The largest number of nodes. Weights fall below 2^−1022 before that, unless the standard deviation is small.</summary>
-    public const int MaximumPoints = 64;
-
     /// <summary>A request with the given parameters.</summary>
-    /// <param name="points">The number of nodes, from <see cref="MinimumPoints"/> to <see cref="MaximumPoints"/>.</param>
+    /// <param name="points">The number of nodes, from <see cref="UniversalRuleRequest.MinimumPoints"/> to <see cref="UniversalRuleRequest.MaximumPoints"/>.</param>
     /// <param name="logMean">The mean of the logarithm; finite.</param>
     /// <param name="logStandardDeviation">The standard deviation of the logarithm; finite and above zero.</param>
     /// <param name="format">The number format of every entry.</param>
     /// <param name="dropZeroWeights">Whether nodes whose weight rounds to zero are left out.</param>
     /// <exception cref="ArgumentOutOfRangeException">A parameter is out of range; the message says what to give.</exception>
     public GaussLogNormalRequest(int points, double logMean, double logStandardDeviation, BinaryFormat format, bool dropZeroWeights)
-        : base(format, dropZeroWeights)
+        : base(points, format, dropZeroWeights)
     {
-        Points = Parameters.RequireCount(points, MinimumPoints, MaximumPoints, "The number of points", nameof(points));
         if (!Parameters.IsFinite(logMean))
         {
             throw new ArgumentOutOfRangeException(nameof(logMean), logMean, "The mean of the logarithm must be finite.");
@@ -46,9 +40,6 @@ public sealed record GaussLogNormalRequest : RuleRequest
         LogMean = logMean == 0 ? 0.0 : logMean;
         LogStandardDeviation = logStandardDeviation;
     }
-
-    /// <summary>The number of nodes.</summary>
-    public int Points { get; }
 
     /// <summary>The mean of the logarithm.</summary>
     public double LogMean { get; }

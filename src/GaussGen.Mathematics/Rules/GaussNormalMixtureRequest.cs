@@ -14,19 +14,13 @@ namespace GaussGen.Mathematics.Rules;
 /// A request for a Gauss rule for a finite mixture of normal distributions. Each parameter is the exact value of a binary64 number; the weights
 /// are divided by their exact sum.
 /// </summary>
-public sealed record GaussNormalMixtureRequest : RuleRequest
+public sealed record GaussNormalMixtureRequest : UniversalRuleRequest
 {
-    /// <summary>The smallest number of nodes.</summary>
-    public const int MinimumPoints = 1;
-
-    /// <summary>The largest number of nodes.</summary>
-    public const int MaximumPoints = 64;
-
     /// <summary>The largest number of components.</summary>
     public const int MaximumComponents = 64;
 
     /// <summary>A request with the given parameters; the three lists have one length.</summary>
-    /// <param name="points">The number of nodes, from <see cref="MinimumPoints"/> to <see cref="MaximumPoints"/>.</param>
+    /// <param name="points">The number of nodes, from <see cref="UniversalRuleRequest.MinimumPoints"/> to <see cref="UniversalRuleRequest.MaximumPoints"/>.</param>
     /// <param name="weights">The weights of the components: finite, none negative, at least one above zero.</param>
     /// <param name="means">Their means; finite.</param>
     /// <param name="standardDeviations">Their standard deviations; finite and above zero.</param>
@@ -36,9 +30,8 @@ public sealed record GaussNormalMixtureRequest : RuleRequest
     /// <exception cref="ArgumentOutOfRangeException">A parameter is out of range; the message says what to give.</exception>
     public GaussNormalMixtureRequest(
         int points, ValueList weights, ValueList means, ValueList standardDeviations, BinaryFormat format, bool dropZeroWeights)
-        : base(format, dropZeroWeights)
+        : base(points, format, dropZeroWeights)
     {
-        Points = Parameters.RequireCount(points, MinimumPoints, MaximumPoints, "The number of points", nameof(points));
         _ = Parameters.RequireCount(weights.Count, 1, MaximumComponents, "The number of components", nameof(weights));
         if (means.Count != weights.Count || standardDeviations.Count != weights.Count)
         {
@@ -52,9 +45,6 @@ public sealed record GaussNormalMixtureRequest : RuleRequest
         StandardDeviations = standardDeviations.All(Parameters.IsPositive) ? standardDeviations : throw new ArgumentOutOfRangeException(
             nameof(standardDeviations), "The standard deviations must be finite and above zero.");
     }
-
-    /// <summary>The number of nodes.</summary>
-    public int Points { get; }
 
     /// <summary>The weights of the components, not necessarily with sum 1.</summary>
     public ValueList Weights { get; }

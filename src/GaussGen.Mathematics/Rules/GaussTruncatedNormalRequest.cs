@@ -13,25 +13,18 @@ namespace GaussGen.Mathematics.Rules;
 /// A request for a Gauss rule for the standard normal density on an interval, one end of which may be infinite. An end is the exact
 /// value of a binary64 number.
 /// </summary>
-public sealed record GaussTruncatedNormalRequest : RuleRequest
+public sealed record GaussTruncatedNormalRequest : UniversalRuleRequest
 {
-    /// <summary>The smallest number of nodes.</summary>
-    public const int MinimumPoints = 1;
-
-    /// <summary>The largest number of nodes.</summary>
-    public const int MaximumPoints = 64;
-
     /// <summary>A request with the given parameters.</summary>
-    /// <param name="points">The number of nodes, from <see cref="MinimumPoints"/> to <see cref="MaximumPoints"/>.</param>
+    /// <param name="points">The number of nodes, from <see cref="UniversalRuleRequest.MinimumPoints"/> to <see cref="UniversalRuleRequest.MaximumPoints"/>.</param>
     /// <param name="lower">The lower end; −∞ is allowed where the upper end is finite.</param>
     /// <param name="upper">The upper end, above the lower one; +∞ is allowed where the lower end is finite.</param>
     /// <param name="format">The number format of every entry.</param>
     /// <param name="dropZeroWeights">Whether nodes whose weight rounds to zero are left out.</param>
     /// <exception cref="ArgumentOutOfRangeException">A parameter is out of range; the message says what to give.</exception>
     public GaussTruncatedNormalRequest(int points, double lower, double upper, BinaryFormat format, bool dropZeroWeights)
-        : base(format, dropZeroWeights)
+        : base(points, format, dropZeroWeights)
     {
-        Points = Parameters.RequireCount(points, MinimumPoints, MaximumPoints, "The number of points", nameof(points));
         if (!IsInterval(lower, upper))
         {
             throw new ArgumentOutOfRangeException(
@@ -42,9 +35,6 @@ public sealed record GaussTruncatedNormalRequest : RuleRequest
         Lower = lower == 0 ? 0.0 : lower;
         Upper = upper == 0 ? 0.0 : upper;
     }
-
-    /// <summary>The number of nodes.</summary>
-    public int Points { get; }
 
     /// <summary>The lower end.</summary>
     public double Lower { get; }

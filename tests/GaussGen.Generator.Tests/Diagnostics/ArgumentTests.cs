@@ -104,7 +104,7 @@ public sealed class ArgumentTests
             [{{attribute.Replace(place, $"{{|{id}:{place}|}}", System.StringComparison.Ordinal)}}]
             internal static partial class Echo
             {
-                private static readonly int Count = 5;
+                internal static readonly int Count = 5;
             }
 
             internal static class Use

@@ -17,6 +17,9 @@ internal sealed class ErrorPlot
     private const int Gap = 16;
     private const int StripHeight = 30;
 
+    /// <summary>So many groups leave room for their counts beside the names.</summary>
+    private const int MostCountedGroups = 4;
+
     private readonly List<(string Name, List<EntryProof> Entries)> _groups;
     private readonly double _worst;
 
@@ -92,7 +95,7 @@ internal sealed class ErrorPlot
                 places.Where(place => place.Entry.Verdict == Verdict.Proven).Select(place => (place.X, up.At(place.Entry.DistanceInUlp))));
             canvas.Crosses(Above(Verdict.Wrong));
             canvas.Diamonds(Above(Verdict.Unproven));
-            canvas.Text((start + end) / 2, PlotCanvas.Bottom + 19, "middle", $"{name} ({entries.Count})");
+            canvas.Text((start + end) / 2, PlotCanvas.Bottom + 19, "middle", _groups.Count > MostCountedGroups ? name : $"{name} ({entries.Count})");
             start = end + Gap;
             if (start < PlotCanvas.Right)
             {
