@@ -3,13 +3,14 @@ using System.Linq;
 using System.Numerics;
 using System.Threading;
 using GaussGen.Mathematics.Arithmetic;
+using GaussGen.Mathematics.Proofs.Integrals;
 
 namespace GaussGen.Mathematics.Proofs.Gauss;
 
 /// <summary>The density proportional to exp(−p(x)), p(x) = c₁x² + c₂x⁴ + … + c_d x^(2d) with c_d above zero.</summary>
 /// <remarks>
 /// With one coefficient the moments are (k−1)!! (2c₁)^(−k/2) for even k (NIST DLMF 5.4.6). Else the first d even ones are integrals that
-/// <see cref="EvenExponentialIntegrals"/> encloses, and the others follow by parts: (2k+1) I₂ₖ = Σ 2i cᵢ I₂ₖ₊₂ᵢ, which gives the last of them.
+/// <see cref="ExponentialPanels"/> encloses, and the others follow by parts: (2k+1) I₂ₖ = Σ 2i cᵢ I₂ₖ₊₂ᵢ, which gives the last of them.
 /// What cancels there is paid for in bits.
 /// </remarks>
 internal sealed class EvenExponentialMoments : WeightMoments
@@ -24,7 +25,7 @@ internal sealed class EvenExponentialMoments : WeightMoments
     public EvenExponentialMoments(Dyadic[] coefficients)
     {
         _coefficients = coefficients;
-        // y = 2^−s x brings the largest of the |cᵢ|^(1/2i) near 1, so that binary64 numbers can choose panels.
+        // y = 2^−s x brings the largest of the |cᵢ|^(1/2i) near 1, and with it the size of all moments.
         _power = coefficients
             .Select((coefficient, index) => (Coefficient: coefficient, Degree: 2 * (index + 1)))
             .Where(term => !term.Coefficient.IsZero)
@@ -40,7 +41,7 @@ internal sealed class EvenExponentialMoments : WeightMoments
     /// <summary>∫ exp(−p(x)) dx over the real line.</summary>
     public Ball Integral(int precision, CancellationToken cancellation) => IsNormal
         ? Ball.Sqrt(Ball.Divide(Constants.Pi(precision + 8, cancellation), Ball.FromDyadic(_coefficients[0]), precision + 8), precision)
-        : EvenExponentialIntegrals.Enclose(_scaled, precision, cancellation)[0].ScaleByPowerOfTwo(_power + 1);
+        : ExponentialPanels.Enclose(_scaled, [0], precision, cancellation)[0].ScaleByPowerOfTwo(_power + 1);
 
     /// <inheritdoc/>
     /// <remarks>With one coefficient, times (2c₁) to the highest power.</remarks>
@@ -100,8 +101,9 @@ internal sealed class EvenExponentialMoments : WeightMoments
 
     private Ball[] ByParts(int count, int bits, CancellationToken cancellation)
     {
-        Ball[] first = EvenExponentialIntegrals.Enclose(_scaled, bits, cancellation);
         int degree = _scaled.Length;
+        int[] orders = [.. Enumerable.Range(0, degree).Select(k => 2 * k)];
+        Ball[] first = ExponentialPanels.Enclose(_scaled, orders, bits, cancellation);
         var even = new Ball[Math.Max((count + 1) / 2, degree)];
         Array.Copy(first, even, degree);
         Ball divisor = Ball.FromDyadic(_scaled[degree - 1] * new Dyadic(2 * degree, 0));
