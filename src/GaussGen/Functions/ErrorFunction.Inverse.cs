@@ -8,7 +8,7 @@ public static partial class ErrorFunction
     /// <summary>The inverse of the error function: the x with erf x = y.</summary>
     /// <param name="y">A number from −1 to 1, or NaN.</param>
     /// <returns>
-    /// The number, odd in y and never falling: ±0 for ±0, ±∞ for ±1, NaN for NaN. Accurate to 0.76 units. Near ±1 a unit in the
+    /// The number, odd in y and never falling: ±0 for ±0, ±∞ for ±1, NaN for NaN. Accurate to 0.77 units. Near ±1 a unit in the
     /// last place of y moves the result by far more than a unit; ask for the quantile of a small probability there
     /// (<see cref="NormalDistribution.Quantile(double)"/>).
     /// </returns>

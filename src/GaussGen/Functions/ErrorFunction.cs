@@ -8,7 +8,7 @@ namespace GaussGen;
 /// <para>
 /// Every function is accurate over its whole range, the far tails included, allocates nothing on modern targets and does nothing before its
 /// first call. "Accurate to 0.75 units" says that no larger error was found, in units in the last place of the true value, at
-/// a hundred thousand points or more against enclosures in ball arithmetic; that is a measurement and not a proof. The overloads for
+/// a million points against enclosures in ball arithmetic; that is a measurement and not a proof. The overloads for
 /// <see cref="float"/> work in binary64 and round once, to within 0.5001 units of binary32.
 /// </para>
 /// <para>

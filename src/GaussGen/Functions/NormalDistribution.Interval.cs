@@ -8,7 +8,7 @@ public static partial class NormalDistribution
     /// <summary>The probability of a value between two numbers, without cancellation in either tail or for a narrow interval.</summary>
     /// <param name="lower">The lower end; −∞ is allowed.</param>
     /// <param name="upper">The upper end, not below the lower one; +∞ is allowed.</param>
-    /// <returns>A number from 0 to 1: 0 where the ends are equal, NaN where one is NaN. Accurate to 1.3 units.</returns>
+    /// <returns>A number from 0 to 1: 0 where the ends are equal, NaN where one is NaN. Accurate to 1.4 units.</returns>
     /// <exception cref="ArgumentOutOfRangeException"><paramref name="upper"/> is below <paramref name="lower"/>.</exception>
     public static double IntervalProbability(double lower, double upper)
     {
