@@ -67,10 +67,10 @@ public sealed record NormalMomentsRequest : MomentRequest
     public override string Claim => ClaimTitle.NormalMoments(MaximumOrder, Mean, StandardDeviation);
 
     /// <summary>Whether a number can be a mean: whether it is finite.</summary>
-    public static bool IsMean(double value) => !double.IsNaN(value) && !double.IsInfinity(value);
+    public static bool IsMean(double value) => Parameters.IsFinite(value);
 
     /// <summary>Whether a number can be a standard deviation: whether it is finite and above zero.</summary>
-    public static bool IsStandardDeviation(double value) => value > 0 && !double.IsInfinity(value);
+    public static bool IsStandardDeviation(double value) => Parameters.IsPositive(value);
 
     /// <summary>Whether a number can be the highest order.</summary>
     public static bool IsMaximumOrder(int value) => value is >= SmallestOrder and <= LargestOrder;
@@ -82,8 +82,8 @@ public sealed record NormalMomentsRequest : MomentRequest
     /// </remarks>
     public override MomentTable Construct(CancellationToken cancellation)
     {
-        Dyadic mean = ValueOf(Mean);
-        Dyadic standardDeviation = ValueOf(StandardDeviation);
+        Dyadic mean = Parameters.ValueOf(Mean);
+        Dyadic standardDeviation = Parameters.ValueOf(StandardDeviation);
         IReadOnlyList<RealNumber> raw = NormalMoments.Raw(mean, standardDeviation, MaximumOrder, cancellation);
         IReadOnlyList<RealNumber> central = NormalMoments.Central(standardDeviation, MaximumOrder, cancellation);
         IReadOnlyList<RealNumber> absolute = NormalMoments.Absolute(standardDeviation, central, cancellation);
@@ -91,14 +91,8 @@ public sealed record NormalMomentsRequest : MomentRequest
     }
 
     private MomentDescription Describe() => new(
-        "the normal distribution with mean " + Write(Mean) + " and standard deviation " + Write(StandardDeviation),
+        "the normal distribution with mean " + Parameters.Write(Mean) + " and standard deviation " + Parameters.Write(StandardDeviation),
         "raw, central and even absolute moments are exact rational numbers, odd absolute ones are a rational number times an "
             + "enclosure of the square root of 2/π",
         "Stein 1981; Winkelbauer 2012; NIST DLMF 5.4");
-
-    private static Dyadic ValueOf(double value) => BinaryFormat.Binary64.ValueOf(BitsOf(value)).Reduce();
-
-    private static string Write(double value) => ShortestDecimal.Write(BitsOf(value), BinaryFormat.Binary64);
-
-    private static ulong BitsOf(double value) => (ulong)BitConverter.DoubleToInt64Bits(value);
 }

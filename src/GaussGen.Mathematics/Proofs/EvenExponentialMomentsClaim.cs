@@ -42,13 +42,7 @@ public sealed record EvenExponentialMomentsClaim : TableClaim
             throw new ArgumentOutOfRangeException(nameof(coefficients), message);
         }
 
-        if (maximumOrder is < 0 or > LargestOrder)
-        {
-            string message = string.Format(CultureInfo.InvariantCulture, "The highest order must be from 0 to {0}.", LargestOrder);
-            throw new ArgumentOutOfRangeException(nameof(maximumOrder), maximumOrder, message);
-        }
-
-        MaximumOrder = maximumOrder;
+        MaximumOrder = ClaimNumbers.RequireOrder(maximumOrder, LargestOrder);
     }
 
     /// <summary>c₁, c₂, ….</summary>

@@ -1,6 +1,5 @@
 using System;
 using System.Collections.Generic;
-using System.Globalization;
 using System.Numerics;
 using System.Threading;
 using GaussGen.Mathematics.Arithmetic;
@@ -25,13 +24,7 @@ public sealed record HalfIntegerGammaClaim : TableClaim
     public HalfIntegerGammaClaim(int maximumOrder, BinaryFormat format)
         : base(format)
     {
-        if (maximumOrder is < 0 or > LargestOrder)
-        {
-            string message = string.Format(CultureInfo.InvariantCulture, "The highest order must be from 0 to {0}.", LargestOrder);
-            throw new ArgumentOutOfRangeException(nameof(maximumOrder), maximumOrder, message);
-        }
-
-        MaximumOrder = maximumOrder;
+        MaximumOrder = ClaimNumbers.RequireOrder(maximumOrder, LargestOrder);
     }
 
     /// <summary>The largest k.</summary>

@@ -1,5 +1,4 @@
 using System;
-using System.Globalization;
 using System.Threading;
 using GaussGen.Mathematics.Baselines;
 using GaussGen.Mathematics.Formats;
@@ -28,14 +27,8 @@ public sealed record HalfNormalMomentsClaim : TableClaim
             throw new ArgumentOutOfRangeException(nameof(scale), scale, "The scale must be finite and above zero.");
         }
 
-        if (maximumOrder is < 0 or > LargestOrder)
-        {
-            string message = string.Format(CultureInfo.InvariantCulture, "The highest order must be from 0 to {0}.", LargestOrder);
-            throw new ArgumentOutOfRangeException(nameof(maximumOrder), maximumOrder, message);
-        }
-
         Scale = scale;
-        MaximumOrder = maximumOrder;
+        MaximumOrder = ClaimNumbers.RequireOrder(maximumOrder, LargestOrder);
     }
 
     /// <summary>The scale.</summary>

@@ -1,5 +1,4 @@
 using System;
-using System.Globalization;
 using System.Threading;
 using GaussGen.Mathematics.Baselines;
 using GaussGen.Mathematics.Formats;
@@ -35,16 +34,10 @@ public sealed record LogNormalMomentsClaim : TableClaim
                 nameof(logStandardDeviation), logStandardDeviation, "The standard deviation of the logarithm must be finite and above zero.");
         }
 
-        if (maximumOrder is < 0 or > LargestOrder)
-        {
-            string message = string.Format(CultureInfo.InvariantCulture, "The highest order must be from 0 to {0}.", LargestOrder);
-            throw new ArgumentOutOfRangeException(nameof(maximumOrder), maximumOrder, message);
-        }
-
         // −0 and 0 are one number, also where claims are compared.
         LogMean = logMean == 0 ? 0.0 : logMean;
         LogStandardDeviation = logStandardDeviation;
-        MaximumOrder = maximumOrder;
+        MaximumOrder = ClaimNumbers.RequireOrder(maximumOrder, LargestOrder);
     }
 
     /// <summary>The mean of the logarithm.</summary>

@@ -1,5 +1,4 @@
 using System;
-using System.Globalization;
 using System.Threading;
 using GaussGen.Mathematics.Baselines;
 using GaussGen.Mathematics.Formats;
@@ -24,26 +23,20 @@ public sealed record NormalMomentsClaim : TableClaim
     public NormalMomentsClaim(double mean, double standardDeviation, int maximumOrder, BinaryFormat format)
         : base(format)
     {
-        if (double.IsNaN(mean) || double.IsInfinity(mean))
+        if (!ClaimNumbers.IsFinite(mean))
         {
             throw new ArgumentOutOfRangeException(nameof(mean), mean, "The mean must be finite.");
         }
 
-        if (!(standardDeviation > 0) || double.IsInfinity(standardDeviation))
+        if (!ClaimNumbers.IsPositive(standardDeviation))
         {
             throw new ArgumentOutOfRangeException(
                 nameof(standardDeviation), standardDeviation, "The standard deviation must be finite and above zero.");
         }
 
-        if (maximumOrder is < 0 or > LargestOrder)
-        {
-            string message = string.Format(CultureInfo.InvariantCulture, "The highest order must be from 0 to {0}.", LargestOrder);
-            throw new ArgumentOutOfRangeException(nameof(maximumOrder), maximumOrder, message);
-        }
-
         Mean = mean;
         StandardDeviation = standardDeviation;
-        MaximumOrder = maximumOrder;
+        MaximumOrder = ClaimNumbers.RequireOrder(maximumOrder, LargestOrder);
     }
 
     /// <summary>The mean.</summary>

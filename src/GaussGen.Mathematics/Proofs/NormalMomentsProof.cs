@@ -4,7 +4,6 @@ using System.Globalization;
 using System.Numerics;
 using System.Threading;
 using GaussGen.Mathematics.Arithmetic;
-using GaussGen.Mathematics.Formats;
 
 namespace GaussGen.Mathematics.Proofs;
 
@@ -41,9 +40,9 @@ internal sealed class NormalMomentsProof
     {
         _claim = claim;
         _report = new ProofReport(claim, data);
-        _mean = ValueOf(claim.Mean);
+        _mean = ClaimNumbers.ValueOf(claim.Mean);
         _meanSquared = _mean * _mean;
-        _standardDeviationPowers = Powers(ValueOf(claim.StandardDeviation), claim.MaximumOrder);
+        _standardDeviationPowers = Powers(ClaimNumbers.ValueOf(claim.StandardDeviation), claim.MaximumOrder);
         _factorials = new BigInteger[claim.MaximumOrder + 1];
         _factorials[0] = BigInteger.One;
         for (int k = 1; k <= claim.MaximumOrder; k++)
@@ -118,9 +117,6 @@ internal sealed class NormalMomentsProof
     }
 
     private KnownNumber Exact(Dyadic value) => new(value, value, NearestValue.Of(_claim.Format, Ball.FromDyadic(value)));
-
-    private static Dyadic ValueOf(double value) =>
-        BinaryFormat.Binary64.ValueOf((ulong)BitConverter.DoubleToInt64Bits(value)).Reduce();
 
     private static Dyadic[] Powers(Dyadic factor, int count)
     {

@@ -1,5 +1,4 @@
 using System;
-using System.Globalization;
 using System.Threading;
 using GaussGen.Mathematics.Baselines;
 using GaussGen.Mathematics.Formats;
@@ -44,18 +43,12 @@ public sealed record TruncatedNormalMomentsClaim : TableClaim
                 nameof(upper), upper, "The lower end must be below the upper end, and one of them finite.");
         }
 
-        if (maximumOrder is < 0 or > LargestOrder)
-        {
-            string message = string.Format(CultureInfo.InvariantCulture, "The highest order must be from 0 to {0}.", LargestOrder);
-            throw new ArgumentOutOfRangeException(nameof(maximumOrder), maximumOrder, message);
-        }
-
         // −0 and 0 are one number, also where claims are compared.
         Mean = mean == 0 ? 0.0 : mean;
         StandardDeviation = standardDeviation;
         Lower = lower == 0 ? 0.0 : lower;
         Upper = upper == 0 ? 0.0 : upper;
-        MaximumOrder = maximumOrder;
+        MaximumOrder = ClaimNumbers.RequireOrder(maximumOrder, LargestOrder);
     }
 
     /// <summary>The mean before truncation.</summary>

@@ -15,7 +15,7 @@ public class TruncatedNormalMomentsTests
 {
     private const double Infinity = double.PositiveInfinity;
 
-    // The inverse Mills ratio φ(a)/(1 − Φ(a)), the mean above a (Tallis 1961), by mpmath at 60 digits.
+    // The inverse Mills ratio φ(a)/(1 − Φ(a)), the mean above a (Tallis 1961; recalled), by mpmath at 60 digits.
     [Theory]
     [InlineData(0.0, "0.797884560802865355879892119868763736951717262329869315331852")]
     [InlineData(1.0, "1.52513527616098120908909053639057871330711636492060333554631")]

@@ -10,7 +10,7 @@ namespace GaussGen.Mathematics.Tests.Sequences;
 
 public class HalfIntegerGammaTests
 {
-    // NIST DLMF 5.4.6: Γ(½) = √π = 1.77245 38509 05516 02729 81674 83341 14518 27975…; the others from it by 5.5.1, with 60 digits (mpmath).
+    // NIST DLMF 5.4.6: Γ(½) = √π = 1.77245 38509 05516 02729 81674 83341 14518 27975…; the others from it by 5.5.1 (recalled, recomputed), with 60 digits (mpmath).
     [Theory]
     [InlineData(0, "1.77245385090551602729816748334114518279754945612238712821381")]
     [InlineData(1, "0.88622692545275801364908374167057259139877472806119356410690")]

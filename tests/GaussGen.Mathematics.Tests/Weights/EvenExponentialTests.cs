@@ -11,7 +11,7 @@ namespace GaussGen.Mathematics.Tests.Weights;
 
 public class EvenExponentialTests
 {
-    // 2Γ(5/4), classical; the double well by modified Bessel functions, ∫ exp(2x² − x⁴/2) dx = (π/2) √2 e (I₋₁/₄(1) + I₁/₄(1)) (DLMF 10.32,
+    // 2Γ(5/4), classical (recalled, recomputed); the double well by modified Bessel functions, ∫ exp(2x² − x⁴/2) dx = (π/2) √2 e (I₋₁/₄(1) + I₁/₄(1)) (DLMF 10.32,
     // recalled, recomputed with mpmath at 50 digits); 2Γ(7/6) for x⁶; √(π/c) for one coefficient.
     [Theory]
     [InlineData("1.8128049541109541559653425779338360014976", 0.0, 1.0)]

@@ -44,7 +44,7 @@ public class ClosedFormRuleTests
     [Fact]
     public void The_one_node_of_a_truncated_rule_is_the_truncated_mean()
     {
-        // The inverse Mills ratio φ(8)/(1 − Φ(8)) (Tallis 1961), by mpmath; and between −2 and 2, by symmetry, 0 with the variance
+        // The inverse Mills ratio φ(8)/(1 − Φ(8)) (Tallis 1961; recalled), by mpmath; and between −2 and 2, by symmetry, 0 with the variance
         // 1 − 4φ(2)/(2Φ(2) − 1) as the square of the two nodes.
         AssertRule("truncated 8 inf", [8.1213681122361127], [1]);
         double spread = Math.Sqrt(0.77374130354992325);
